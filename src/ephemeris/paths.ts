@@ -1,0 +1,22 @@
+import type { Body } from '../bodies/index.js';
+import type { Vector } from '../math/index.js';
+import type { TtDays } from '../time/index.js';
+
+/** Axes in which a direction is given; "of date" is the true equator and equinox (nutation included). */
+export type Frame = 'j2000' | 'equator-of-date' | 'ecliptic-of-date';
+
+/** A vector with its first and second time derivatives, per day and per day². */
+export interface Motion {
+  readonly position: Vector;
+  readonly velocity: Vector;
+  readonly acceleration: Vector;
+}
+
+/**
+ * The bodies' apparent geocentric paths (light-time, deflection and aberration applied): vectors whose direction is
+ * the apparent direction and whose length is the light-time distance in au.
+ */
+export interface Paths {
+  position(body: Body, frame: Frame, tt: TtDays): Vector;
+  motion(body: Body, frame: Frame, tt: TtDays): Motion;
+}
