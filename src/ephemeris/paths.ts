@@ -13,8 +13,8 @@ export interface Motion {
 }
 
 /**
- * The bodies' apparent geocentric paths (light-time, deflection and aberration applied): vectors whose direction is
- * the apparent direction and whose length is the light-time distance in au.
+ * The bodies' apparent geocentric paths (light-time and aberration applied; the Sun's deflection of light, 0.03″ at
+ * 15° from it, left out): vectors whose direction is the apparent one and whose length is the light-time distance, au.
  */
 export interface Paths {
   position(body: Body, frame: Frame, tt: TtDays): Vector;

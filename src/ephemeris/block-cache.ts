@@ -1,0 +1,24 @@
+/**
+ * Blocks of a timeline, made on first need and kept until `capacity` newer ones have pushed them out, so that a
+ * forecast of a thousand years needs no more memory than one of a century.
+ */
+export class BlockCache<Block> {
+  private readonly blocks = new Map<number, Block>();
+
+  constructor(
+    private readonly make: (index: number) => Block,
+    private readonly capacity: number,
+  ) {}
+
+  get(index: number): Block {
+    const known = this.blocks.get(index);
+    if (known !== undefined) return known;
+    if (this.blocks.size >= this.capacity) {
+      const oldest = this.blocks.keys().next();
+      if (oldest.done !== true) this.blocks.delete(oldest.value);
+    }
+    const block = this.make(index);
+    this.blocks.set(index, block);
+    return block;
+  }
+}
