@@ -2,8 +2,8 @@ import type { Grid } from './roots-on-grid.js';
 
 /**
  * First derivative by the five-point difference of half-width 2h. Its error is h⁴/30 of the fifth derivative, plus
- * 1.5/h times the roundoff of the values (1e-12 rad here): with h = 0.1 day both move a station or an extremum by less
- * than 0.1 s.
+ * 1.5/h times the roundoff of the values (1e-12 rad here): with h = 0.25 day both move a station or an extremum by
+ * less than 0.1 s.
  */
 export const derivative =
   (f: (tt: number) => number, hDays: number) =>
@@ -19,18 +19,21 @@ export const angularDerivative =
     return (8 * inner - outer) / (12 * hDays);
   };
 
-/** The same on samples; the two at either end have no derivative and are infinite, so that no root is sought there. */
+/**
+ * The same on samples, h being `stride` steps of the grid, so that samples and direct values agree in sign. The ends,
+ * which have no derivative, are left NaN: no root is sought there.
+ */
 export function sampledDerivative(
   { step, count }: Grid,
   samples: Float64Array,
-  angular = false,
+  { stride, angular }: { stride: number; angular: boolean },
 ): Float64Array {
-  const rates = new Float64Array(count).fill(Infinity);
+  const rates = new Float64Array(count).fill(NaN);
   const difference = angular ? wrapped : (x: number): number => x;
-  for (let i = 2; i < count - 2; i++) {
-    const inner = difference(samples[i + 1]! - samples[i - 1]!);
-    const outer = difference(samples[i + 2]! - samples[i - 2]!);
-    rates[i] = (8 * inner - outer) / (12 * step);
+  for (let i = 2 * stride; i < count - 2 * stride; i++) {
+    const inner = difference(samples[i + stride]! - samples[i - stride]!);
+    const outer = difference(samples[i + 2 * stride]! - samples[i - 2 * stride]!);
+    rates[i] = (8 * inner - outer) / (12 * stride * step);
   }
   return rates;
 }

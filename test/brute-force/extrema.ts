@@ -7,16 +7,17 @@ import type { Grid, Root } from './roots-on-grid.js';
 import { sampled as sample } from './sampled-sky.js';
 import type { SampledSky } from './sampled-sky.js';
 import { skyNames } from './scan-row.js';
-import type { PlanetName, ScanRow } from './scan-row.js';
+import type { ScanRow } from './scan-row.js';
 import { venusMagnitude, venusPhaseAngle } from './venus-magnitude.js';
 
 /** Kinds at which a rate is zero: stations and extrema. A root that rises is a minimum, one that falls a maximum. */
 
 const DEGREE = Math.PI / 180;
-const STEP_DAYS = 0.1;
-/** The distance of an outer planet from the Sun bends so slowly that a wider difference is needed against roundoff. */
-const SLOW_STEP_DAYS = 2;
+/** The distance of an outer planet from the Sun bends so slowly that a wide difference is needed against roundoff. */
+const SLOW_STRIDE = 8;
 const APPULSE_LIMIT = 5 * DEGREE;
+/** Where appulses are looked for: the limit and a margin for the width of the differences. */
+const APPULSE_REGION = 8 * DEGREE;
 
 interface Extremum extends Root {
   /** Second derivative, in the unit of the function a day². */
@@ -24,16 +25,20 @@ interface Extremum extends Root {
 }
 
 interface Curve {
+  /** NaN where no extremum is to be sought. */
   readonly samples: Float64Array;
   readonly direct: (tt: number) => number;
-  readonly stepDays?: number;
+  /** Half-width of the differences, in steps of the grid. */
+  readonly stride?: number;
+  /** The values are angles within −π … π. */
   readonly angular?: boolean;
 }
 
-function extrema(grid: Grid, { samples, direct, stepDays = STEP_DAYS, angular = false }: Curve): Extremum[] {
-  const rate = (angular ? angularDerivative : derivative)(direct, stepDays);
-  const curvature = derivative(rate, stepDays);
-  const rates = sampledDerivative(grid, samples, angular);
+function extrema(grid: Grid, { samples, direct, stride = 1, angular = false }: Curve): Extremum[] {
+  const hDays = stride * grid.step;
+  const rate = (angular ? angularDerivative : derivative)(direct, hDays);
+  const curvature = derivative(rate, hDays);
+  const rates = sampledDerivative(grid, samples, { stride, angular });
   return rootsOnGrid(grid, {
     samples: rates,
     direct: rate,
@@ -109,8 +114,9 @@ const anomalisticPeriodDays = {
 } as const;
 
 /**
- * The deepest and the highest heliocentric distance of each revolution. The grid is widened by a revolution at either
- * end, so that no extremum inside is preferred to a better one outside.
+ * The deepest and the highest heliocentric distance of each revolution: Neptune's and Uranus's have further local
+ * extrema near them, which are no events. The grid is widened by a revolution at either end, so that no extremum
+ * inside is preferred to a better one outside.
  */
 export function apsides({ start, step, count }: Grid): ScanRow[] {
   return skyNames.flatMap((planet) => {
@@ -118,57 +124,54 @@ export function apsides({ start, step, count }: Grid): ScanRow[] {
     const margin = Math.ceil(periodDays / step);
     const wide = { start: start - margin * step, step, count: count + 2 * margin };
     const direct = (tt: number): number => HelioDistance(libraryBody[planet], timeAt(tt));
-    const stepDays = periodDays > 1000 ? SLOW_STEP_DAYS : STEP_DAYS;
-    const all = extrema(wide, { samples: sample(wide, direct), direct, stepDays });
-    const kinds = [
-      ['perihelion', all.filter((root) => root.rising), 1],
-      ['aphelion', all.filter((root) => !root.rising), -1],
-    ] as const;
-    return kinds.flatMap(([kind, roots, sign]) =>
-      revolutions(roots, periodDays).map((local) => {
-        const best = local.reduce((a, b) => (sign * direct(b.tt) < sign * direct(a.tt) ? b : a));
-        return apsis(kind, planet, best, direct(best.tt));
-      }),
+    const stride = periodDays > 1000 ? SLOW_STRIDE : 1;
+    const roots = extrema(wide, { samples: sample(wide, direct), direct, stride }).map(
+      ({ tt, rising, curvature }) => ({ tt, rising, curvature, distanceAu: direct(tt) }),
     );
+    return roots
+      .filter((root) => !roots.some((other) => isOutdone(root, other, periodDays)))
+      .map(({ tt, rising, curvature, distanceAu }) => ({
+        kind: rising ? 'perihelion' : 'aphelion',
+        reckoning: null,
+        bodies: [planet],
+        tt,
+        slope: curvature,
+        value: distanceAu,
+      }));
   });
 }
 
-const apsis = (kind: string, planet: PlanetName, root: Extremum, distanceAu: number): ScanRow => ({
-  kind,
-  reckoning: null,
-  bodies: [planet],
-  tt: root.tt,
-  slope: root.curvature,
-  value: distanceAu,
-});
-
-/** Extrema of one sense in groups that lie less than half a period apart. */
-function revolutions(roots: readonly Extremum[], periodDays: number): Extremum[][] {
-  const groups: Extremum[][] = [];
-  for (const root of roots) {
-    const last = groups.at(-1);
-    if (last && root.tt - last[0]!.tt < periodDays / 2) last.push(root);
-    else groups.push([root]);
-  }
-  return groups;
+interface Apsis {
+  readonly tt: number;
+  readonly rising: boolean;
+  readonly distanceAu: number;
 }
 
-/** Venus at her brightest before and after inferior conjunction. */
+/** Whether another extremum of the same revolution and sense lies deeper, or higher. */
+function isOutdone(root: Apsis, other: Apsis, periodDays: number): boolean {
+  if (other.rising !== root.rising || Math.abs(other.tt - root.tt) > 0.75 * periodDays) return false;
+  return root.rising ? other.distanceAu < root.distanceAu : other.distanceAu > root.distanceAu;
+}
+
+/**
+ * Venus at her brightest before and after inferior conjunction, phase angles 90°–150°. The samples outside 80°–160°
+ * are left blank: the phase angle turns sharply at superior conjunction, and the formula ends at 163.7°.
+ */
 export function greatestBrilliancies({ grid }: SampledSky): ScanRow[] {
-  const direct = (tt: number): number => venusMagnitude(new Sky(tt));
-  return extrema(grid, { samples: sample(grid, direct), direct })
-    .filter((root) => root.rising)
-    .filter((root) => {
-      const phaseAngle = venusPhaseAngle(new Sky(root.tt));
-      return phaseAngle > 90 * DEGREE && phaseAngle < 150 * DEGREE;
-    })
+  const magnitude = (tt: number): number => venusMagnitude(new Sky(tt));
+  const phaseAngleDeg = (tt: number): number => venusPhaseAngle(new Sky(tt)) / DEGREE;
+  const between = (tt: number, low: number, high: number): boolean =>
+    phaseAngleDeg(tt) > low && phaseAngleDeg(tt) < high;
+  const samples = sample(grid, (tt) => (between(tt, 80, 160) ? magnitude(tt) : NaN));
+  return extrema(grid, { samples, direct: magnitude })
+    .filter((root) => root.rising && between(root.tt, 90, 150))
     .map((root) => ({
       kind: 'greatest-brilliancy',
       reckoning: null,
       bodies: ['venus'],
       tt: root.tt,
       slope: root.curvature,
-      value: direct(root.tt),
+      value: magnitude(root.tt),
     }));
 }
 
@@ -184,13 +187,13 @@ export function appulses({ grid, direction }: SampledSky): ScanRow[] {
       return (a[0] - b[0]) ** 2 + (a[1] - b[1]) ** 2 + (a[2] - b[2]) ** 2;
     };
     const [x, y, z] = direction;
-    const samples = new Float64Array(grid.count);
-    for (let i = 0; i < grid.count; i++) {
-      samples[i] =
-        (x[first][i]! - x[second][i]!) ** 2 +
+    const samples = x[first].map((firstX, i) => {
+      const squared =
+        (firstX - x[second][i]!) ** 2 +
         (y[first][i]! - y[second][i]!) ** 2 +
         (z[first][i]! - z[second][i]!) ** 2;
-    }
+      return squared < APPULSE_REGION ** 2 ? squared : NaN;
+    });
     return extrema(grid, { samples, direct: squaredChord })
       .filter((root) => root.rising)
       .flatMap((root) => {

@@ -15,8 +15,6 @@ export interface Root {
   readonly tt: number;
   /** The function passes from negative to positive. */
   readonly rising: boolean;
-  /** One of two roots inside a single step, which no change of sign between samples betrays. */
-  readonly hidden: boolean;
 }
 
 export interface Sought {
@@ -34,8 +32,6 @@ const BISECTIONS = 40;
 const EXTREMUM_TOLERANCE_DAYS = 1e-5;
 const GOLDEN_STEPS = 40;
 const GOLDEN = (Math.sqrt(5) - 1) / 2;
-/** How far outside its step a root may lie where samples and direct values are differences of unequal width. */
-const SLACK_IN_STEPS = 0.02;
 
 const signOf = (value: number): 1 | -1 => (value < 0 ? -1 : 1);
 
@@ -56,8 +52,10 @@ export function rootsOnGrid(grid: Grid, { samples, direct, limit, grazes }: Soug
     if (!(Math.abs(here) < limit)) continue;
     const tt = grid.start + i * grid.step;
     if (Math.abs(after) < limit && signOf(here) !== signOf(after)) {
-      const bracketed = bracket(direct, tt, tt + grid.step, signOf(here));
-      roots.push({ tt: bisect(direct, ...bracketed), rising: here < 0, hidden: false });
+      roots.push({
+        tt: bisect(direct, tt, tt + grid.step, signOf(here)),
+        rising: here < 0,
+      });
     }
     const sign = signOf(here);
     const isLeast = sign * before >= sign * here && sign * here < sign * after && sign * before < limit;
@@ -68,23 +66,12 @@ export function rootsOnGrid(grid: Grid, { samples, direct, limit, grazes }: Soug
   return roots.sort((a, b) => a.tt - b.tt);
 }
 
-/** The ends of a step, moved apart a little where the direct values do not change sign between them. */
-function bracket(f: (tt: number) => number, from: number, to: number, sign: 1 | -1): [number, number] {
-  const slack = SLACK_IN_STEPS * (to - from);
-  const start = signOf(f(from)) === sign ? from : from - slack;
-  const end = signOf(f(to)) === sign ? to + slack : to;
-  if (signOf(f(start)) !== sign || signOf(f(end)) === sign) {
-    throw new Error(`The samples change sign between TT ${from} and ${to}, the function itself does not.`);
-  }
-  return [start, end];
-}
-
-function bisect(f: (tt: number) => number, from: number, to: number): number {
+/** The root between two instants, `f` having the given sign at the first and the other one at the second. */
+function bisect(f: (tt: number) => number, from: number, to: number, signFrom: 1 | -1): number {
   let [low, high] = [from, to];
-  const signLow = signOf(f(low));
   for (let step = 0; step < BISECTIONS && high - low > ROOT_TOLERANCE_DAYS; step++) {
     const middle = (low + high) / 2;
-    if (signOf(f(middle)) === signLow) low = middle;
+    if (signOf(f(middle)) === signFrom) low = middle;
     else high = middle;
   }
   return (low + high) / 2;
@@ -102,8 +89,8 @@ function hiddenPair(f: (tt: number) => number, from: number, to: number, sign: 1
     if (least < 0) {
       const inside = heightLeft < heightRight ? left : right;
       return [
-        { tt: bisect(f, from, inside), rising: sign < 0, hidden: true },
-        { tt: bisect(f, inside, to), rising: sign > 0, hidden: true },
+        { tt: bisect(f, from, inside, sign), rising: sign < 0 },
+        { tt: bisect(f, inside, to, sign < 0 ? 1 : -1), rising: sign > 0 },
       ];
     }
     if (heightLeft < heightRight) {
