@@ -1,4 +1,4 @@
-import type { Body, Planet, SkyPlanet } from '../bodies/index.js';
+import type { Planet, SkyPlanet } from '../bodies/index.js';
 import type { LocalView } from '../sky/index.js';
 import type { TtDays, UtcMillis } from '../time/index.js';
 import type { KindName } from './kind-names.js';
@@ -145,9 +145,9 @@ export interface Meeting {
   readonly bodies: readonly [SkyPlanet, SkyPlanet];
   readonly cycle: number;
   readonly series: Series | null;
-  /** Ids of the events that belong to it. */
-  readonly conjunctionRa: string | null;
-  readonly conjunctionLongitude: string | null;
+  /** Ids of the events that belong to it, in order of time: none, one, or two of a grazing pair of each reckoning. */
+  readonly conjunctionsRa: readonly string[];
+  readonly conjunctionsLongitude: readonly string[];
   readonly appulse: string | null;
   /** A least separation or least difference without a conjunction. */
   readonly grazing: boolean;
@@ -163,7 +163,8 @@ export interface Forecast {
   readonly from: UtcMillis;
   readonly to: UtcMillis;
   readonly source: SourceNote;
-  readonly bodies: readonly Body[];
+  /** The planets asked for: every event concerns one of them. */
+  readonly bodies: readonly Planet[];
   readonly events: readonly ForecastEvent[];
   readonly meetings: readonly Meeting[];
 }

@@ -3,16 +3,16 @@ export class NoConvergenceError extends Error {
   override readonly name = 'NoConvergenceError';
 }
 
-const MAX_BRACKETED_STEPS = 80;
+const MAX_BRACKETED_STEPS = 100;
 
 /**
- * The root of a continuous function between two points where its signs differ: regula falsi with the Illinois
- * weighting, bisecting whenever a step shrinks the bracket too little, so that it always ends.
+ * The root of a continuous function between two points where its signs differ: inverse quadratic interpolation and
+ * secants, with bisection wherever they do not shrink the bracket.
  *
  * @param f any continuous function with f(low)·f(high) ≤ 0
- * @param tolerance the bracket's width at which to stop, in the unit of x
- * @throws NoConvergenceError if the signs do not differ, or after 80 steps
- * Source: Dowell & Jarratt, BIT 11 (1971) 168 (the Illinois weighting).
+ * @param tolerance the root is within this of the value returned, in the unit of x
+ * @throws NoConvergenceError if the signs do not differ, or after 100 steps
+ * Source: R. P. Brent, Algorithms for Minimization without Derivatives (1973), ch. 4.
  */
 export function bracketedRoot(
   f: (x: number) => number,
@@ -27,27 +27,50 @@ export function bracketedRoot(
   if (fLow > 0 === fHigh > 0) {
     throw new NoConvergenceError(`no change of sign between ${low} (${fLow}) and ${high} (${fHigh})`);
   }
-  let a = low;
-  let b = high;
-  let fa = fLow;
-  let fb = fHigh;
-  let width = Math.abs(b - a);
-  for (let step = 0; step < MAX_BRACKETED_STEPS; step++) {
-    const slow = step % 3 === 2 && Math.abs(b - a) > width / 2;
-    if (step % 3 === 2) width = Math.abs(b - a);
-    const x = slow ? (a + b) / 2 : b - (fb * (b - a)) / (fb - fa);
-    const fx = f(x);
-    if (fx === 0) return x;
-    if (fx > 0 !== fb > 0) {
-      a = b;
-      fa = fb;
-    } else {
-      fa /= 2;
+  // b is the best point so far, c the other side of the root, a the point before b.
+  let [a, fa, b, fb] = [low, fLow, high, fHigh];
+  let [c, fc] = [a, fa];
+  let step = b - a;
+  let stepBefore = step;
+  for (let count = 0; count < MAX_BRACKETED_STEPS; count++) {
+    if (Math.abs(fc) < Math.abs(fb)) {
+      [a, fa, b, fb, c, fc] = [b, fb, c, fc, b, fb];
     }
-    const moved = Math.abs(x - b);
-    b = x;
-    fb = fx;
-    if (moved < tolerance || Math.abs(b - a) < tolerance) return b;
+    const half = (c - b) / 2;
+    const least = tolerance / 2 + 2 * Number.EPSILON * Math.abs(b);
+    if (Math.abs(half) <= least || fb === 0) return b;
+    const proposed = interpolatedStep(a, fa, b, fb, c, fc, half);
+    const trusted =
+      Math.abs(fa) > Math.abs(fb) &&
+      Math.abs(stepBefore) >= least &&
+      Math.abs(proposed) < Math.min(1.5 * Math.abs(half) - least / 2, Math.abs(stepBefore) / 2) &&
+      proposed > 0 === half > 0;
+    stepBefore = trusted ? step : half;
+    step = trusted ? proposed : half;
+    [a, fa] = [b, fb];
+    b += Math.abs(step) > least ? step : Math.sign(half) * least;
+    fb = f(b);
+    if (fb > 0 === fc > 0) {
+      [c, fc] = [a, fa];
+      step = stepBefore = b - a;
+    }
   }
   throw new NoConvergenceError(`no root to ${tolerance} after ${MAX_BRACKETED_STEPS} steps near ${b}`);
+}
+
+/** From b: a secant where only two points differ, inverse quadratic interpolation through three. */
+function interpolatedStep(
+  a: number,
+  fa: number,
+  b: number,
+  fb: number,
+  c: number,
+  fc: number,
+  half: number,
+): number {
+  const s = fb / fa;
+  if (a === c) return (2 * half * s) / (s - 1);
+  const q = fa / fc;
+  const r = fb / fc;
+  return (-s * (2 * half * q * (q - r) - (b - a) * (r - 1))) / ((q - 1) * (r - 1) * (s - 1));
 }

@@ -1,0 +1,81 @@
+import { ttDays } from '../time/index.js';
+import type { TtDays } from '../time/index.js';
+import type { Signal } from './signal.js';
+
+const MAX_STEPS = 12;
+/** A step this small leaves an error far below it, because each step squares the one before. */
+const SETTLED_DAYS = 1e-6;
+
+/**
+ * The zero of a function near an estimate, by secants that start from a known rate.
+ * @param rate the function's rate at the estimate, good to a few per cent (the Kepler orbits give it)
+ * @returns null where the steps do not settle, or run more than `reachDays` from the estimate
+ */
+export function refineZero(
+  estimate: TtDays,
+  rate: number,
+  value: (tt: TtDays) => number,
+  reachDays: number,
+): TtDays | null {
+  let tt = estimate;
+  let slope = rate;
+  let before: { tt: TtDays; value: number } | null = null;
+  for (let step = 0; step < MAX_STEPS; step++) {
+    const here = value(tt);
+    if (before !== null && tt !== before.tt && here !== before.value) {
+      slope = (here - before.value) / (tt - before.tt);
+    }
+    const next = ttDays(tt - here / slope);
+    if (!(Math.abs(next - estimate) <= reachDays)) return null;
+    if (Math.abs(next - tt) < SETTLED_DAYS) return next;
+    before = { tt, value: here };
+    tt = next;
+  }
+  return null;
+}
+
+/**
+ * The zero, or the turning point of the wanted sense, of a signal near an estimate, by Newton's method on the
+ * signal's own derivatives.
+ * @returns null where there is none within `reachDays`
+ */
+export function nearest(
+  sought: 'zero' | 'maximum' | 'minimum',
+  signal: Signal,
+  estimate: TtDays,
+  reachDays: number,
+): TtDays | null {
+  const largestStep = reachDays / 4;
+  let tt = estimate;
+  for (let step = 0; step < 4 * MAX_STEPS; step++) {
+    const jet = signal(tt);
+    const [height, slope] = sought === 'zero' ? [jet.value, jet.rate] : [jet.rate, jet.acceleration];
+    // On the wrong side of an inflection Newton's step leads away from a turning point of the wanted sense: climb instead.
+    const wrongWay = sought !== 'zero' && slope > 0 === (sought === 'maximum');
+    const wanted = wrongWay
+      ? Math.sign(height) * largestStep * (sought === 'maximum' ? 1 : -1)
+      : -height / slope;
+    const shift = Math.max(-largestStep, Math.min(largestStep, wanted));
+    tt = ttDays(tt + shift);
+    if (!(Math.abs(tt - estimate) <= reachDays)) return null;
+    if (Math.abs(shift) < SETTLED_DAYS) return tt;
+  }
+  return null;
+}
+
+/** Half the base of the parabola through three values: long against rounding, short against the curve's own change. */
+const PARABOLA_STEP_DAYS = 0.05;
+const PARABOLA_PASSES = 2;
+
+/** The turning point of a smooth function near one that is already good to minutes, by parabolas through it. */
+export function refineTurn(near: TtDays, value: (tt: TtDays) => number): TtDays {
+  const h = PARABOLA_STEP_DAYS;
+  let tt = near;
+  for (let pass = 0; pass < PARABOLA_PASSES; pass++) {
+    const before = value(ttDays(tt - h));
+    const here = value(tt);
+    const after = value(ttDays(tt + h));
+    tt = ttDays(tt + (h * (before - after)) / (2 * (before - 2 * here + after)));
+  }
+  return tt;
+}

@@ -1,0 +1,82 @@
+import type { Body, Planet } from '../bodies/index.js';
+import { subtractMotions } from '../ephemeris/index.js';
+import type { Frame, Motion } from '../ephemeris/index.js';
+import { dot, length, scale, subtract, wrapPi } from '../math/index.js';
+import type { Jet } from '../math/index.js';
+import type { TtDays } from '../time/index.js';
+
+/** Where signals read the bodies' motions: the ephemeris through its tracks, or the Kepler orbits. */
+export interface SkyModel {
+  /** Geocentric; apparent for the ephemeris, geometric for Kepler orbits. au, days. */
+  geocentric(body: Body, frame: Frame, tt: TtDays): Motion;
+  /** Geometric, axes of J2000.0. */
+  heliocentric(planet: Planet, tt: TtDays): Motion;
+  /** Geometric, ecliptic and equinox of date. */
+  heliocentricOfDate(planet: Planet, tt: TtDays): Motion;
+}
+
+/** A smooth function of TT with its first two time derivatives: what a kind of event looks for. */
+export type Signal = (tt: TtDays) => Jet;
+
+/** A vector's longitude about the z axis, radians in (−π, π], with its derivatives. */
+export function longitudeJet({ position, velocity, acceleration }: Motion): Jet {
+  const { x, y } = position;
+  const rho2 = x * x + y * y;
+  const rho2Rate = 2 * (x * velocity.x + y * velocity.y);
+  const rate = (x * velocity.y - y * velocity.x) / rho2;
+  return {
+    value: Math.atan2(y, x),
+    rate,
+    acceleration: (x * acceleration.y - y * acceleration.x - rate * rho2Rate) / rho2,
+  };
+}
+
+/** longitude(a) − longitude(b) − target, wrapped into (−π, π]. */
+export function longitudeDifference(a: Motion, b: Motion, target: number): Jet {
+  const ja = longitudeJet(a);
+  const jb = longitudeJet(b);
+  return {
+    value: wrapPi(ja.value - jb.value - target),
+    rate: ja.rate - jb.rate,
+    acceleration: ja.acceleration - jb.acceleration,
+  };
+}
+
+/** Half the squared length of a motion: it turns where the length turns, and is smooth even where that vanishes. */
+export const distanceJet = ({ position, velocity, acceleration }: Motion): Jet => ({
+  value: dot(position, position) / 2,
+  rate: dot(position, velocity),
+  acceleration: dot(velocity, velocity) + dot(position, acceleration),
+});
+
+/**
+ * Half the squared chord between two directions on the unit sphere, `1 − cos(separation)`: it turns where the
+ * separation turns, and has no cusp where the separation vanishes.
+ */
+export const separationJet = (a: Motion, b: Motion): Jet => distanceJet(relativeDirection(a, b));
+
+/** The chord from direction b to direction a on the unit sphere, with its derivatives. */
+export const relativeDirection = (a: Motion, b: Motion): Motion =>
+  subtractMotions(directionOf(a), directionOf(b));
+
+/** The unit vector along a motion, with its derivatives. */
+function directionOf({ position, velocity, acceleration }: Motion): Motion {
+  const r = length(position);
+  const u = scale(position, 1 / r);
+  const rRate = dot(u, velocity);
+  const uRate = scale(subtract(velocity, scale(u, rRate)), 1 / r);
+  const rAcceleration = dot(uRate, velocity) + dot(u, acceleration);
+  return {
+    position: u,
+    velocity: uRate,
+    acceleration: {
+      x: (acceleration.x - rAcceleration * u.x - 2 * rRate * uRate.x) / r,
+      y: (acceleration.y - rAcceleration * u.y - 2 * rRate * uRate.y) / r,
+      z: (acceleration.z - rAcceleration * u.z - 2 * rRate * uRate.z) / r,
+    },
+  };
+}
+
+/** The separation, radians, that belongs to the value of `separationJet`. */
+export const separationOf = (halfSquaredChord: number): number =>
+  2 * Math.asin(Math.min(1, Math.sqrt(halfSquaredChord / 2)));
