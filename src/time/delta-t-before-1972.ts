@@ -2,26 +2,33 @@ import { MEASURED_FIRST_YEAR, MEASURED_STEP_YEARS, measuredDeltaTHundredths } fr
 import { leapEras } from './leap-seconds.js';
 
 /**
- * Published standard errors of ΔT before atomic time, seconds: Espenak & Meeus 2006, after Morrison & Stephenson 2004
- * (20 s, 1300–1600) and Stephenson & Houlden 1986 (1700, 1800, 1900). From 1956 atomic clocks carry the table, and what
- * is left is its own half-year step (argued: chords of a curve that bends by less than 0.1 s a year²).
+ * 95 % half-widths of ΔT, seconds. In 1600 and 1700 from the published standard errors of 20 and 5 s (Espenak & Meeus 2006,
+ * after Morrison & Stephenson 2004 and Stephenson & Houlden 1986). Elsewhere the published ones (1 s in 1800, 0.1 s in
+ * 1900) are smaller than the difference between our table and the newest determination (Morrison et al. 2021), so that
+ * difference counts. From 1956 atomic clocks carry the table, and what is left is its half-year step.
  */
-const standardErrors: readonly (readonly [year: number, seconds: number])[] = [
-  [1600, 20],
-  [1700, 5],
-  [1800, 1],
-  [1900, 0.1],
-  [1956, 0.02],
+const halfWidths: readonly (readonly [year: number, seconds: number])[] = [
+  [1500, 100],
+  [1600, 39.2],
+  [1700, 9.8],
+  [1800, 8],
+  [1830, 6],
+  [1850, 3.5],
+  [1890, 2.3],
+  [1910, 1],
+  [1930, 0.5],
+  [1950, 0.5],
+  [1956, 0.04],
 ];
 
-/** Standard error of ΔT in a year before 1972, seconds: interpolated in its logarithm, constant outside the list. */
-export function historicSigmaSeconds(year: number): number {
-  const next = standardErrors.findIndex(([knot]) => knot > year);
-  if (next === 0) return standardErrors[0]![1];
-  if (next < 0) return standardErrors.at(-1)![1];
-  const [year0, sigma0] = standardErrors[next - 1]!;
-  const [year1, sigma1] = standardErrors[next]!;
-  return sigma0 * (sigma1 / sigma0) ** ((year - year0) / (year1 - year0));
+/** 95 % half-width of ΔT in a year before 1972, seconds: interpolated in its logarithm, constant outside the list. */
+export function historicUncertaintySeconds(year: number): number {
+  const next = halfWidths.findIndex(([knot]) => knot > year);
+  if (next === 0) return halfWidths[0]![1];
+  if (next < 0) return halfWidths.at(-1)![1];
+  const [year0, seconds0] = halfWidths[next - 1]!;
+  const [year1, seconds1] = halfWidths[next]!;
+  return seconds0 * (seconds1 / seconds0) ** ((year - year0) / (year1 - year0));
 }
 
 /** ΔT before 1600, seconds: Espenak & Meeus 2006, for the years 500–1600. */

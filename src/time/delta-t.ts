@@ -1,4 +1,4 @@
-import { historicDeltaT, historicSigmaSeconds } from './delta-t-before-1972.js';
+import { historicDeltaT, historicUncertaintySeconds } from './delta-t-before-1972.js';
 import { extrapolationSigmaSeconds, longTermSeconds } from './delta-t-long-term.js';
 import { MILLIS_PER_DAY, SECONDS_PER_DAY } from './instants.js';
 import type { TtDays, UtcMillis } from './instants.js';
@@ -39,7 +39,7 @@ const KNOWN_UNTIL_TT = ttDaysOf(LEAP_SECONDS_KNOWN_UNTIL, lastEra.ttMinusUtcSeco
 function before1972(year: number): DeltaT {
   return {
     ...historicDeltaT(year),
-    uncertaintySeconds: SIGMAS_OF_95_PERCENT * historicSigmaSeconds(year),
+    uncertaintySeconds: historicUncertaintySeconds(year),
     scale: 'UT1',
   };
 }
