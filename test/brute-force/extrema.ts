@@ -2,7 +2,7 @@ import { HelioDistance } from 'astronomy-engine';
 import { columnOf, coordinateOf, pairsOf, reckonings } from './alignments.js';
 import { angleBetween, libraryBody, Sky, timeAt } from './apparent-place.js';
 import { angularDerivative, derivative, sampledDerivative, wrapped } from './derivative.js';
-import { grazesLikeAParabola, rootsOnGrid } from './roots-on-grid.js';
+import { bisect, grazesLikeAParabola, rootsOnGrid } from './roots-on-grid.js';
 import type { Grid, Root } from './roots-on-grid.js';
 import { sampled as sample } from './sampled-sky.js';
 import type { SampledSky } from './sampled-sky.js';
@@ -16,6 +16,9 @@ const DEGREE = Math.PI / 180;
 /** The distance of an outer planet from the Sun bends so slowly that a wide difference is needed against roundoff. */
 const SLOW_STRIDE = 8;
 const APPULSE_LIMIT = 5 * DEGREE;
+/** Half-widths with which an appulse is found again, and how near to the first finding. */
+const SHARP_DAYS = 0.01;
+const SHARPENED_WITHIN_DAYS = 0.02;
 /** Where appulses are looked for: the limit and a margin for the width of the differences. */
 const APPULSE_REGION = 8 * DEGREE;
 
@@ -177,15 +180,16 @@ export function greatestBrilliancies({ grid }: SampledSky): ScanRow[] {
 
 /**
  * Least separations of two planets. The squared chord between the unit vectors is smooth through the closest ones,
- * where the angle itself has a kink.
+ * where the angle itself has a kink. Mercury, Venus and Mars are fast enough for a much finer difference, and need it:
+ * the relative motion of two of them can turn within days, and the deflection of light behind the Sun within the hour.
  */
 export function appulses({ grid, direction }: SampledSky): ScanRow[] {
   return pairsOf(skyNames).flatMap(([first, second]) => {
-    const squaredChord = (tt: number): number => {
+    const separation = (tt: number): number => {
       const sky = new Sky(tt);
-      const [a, b] = [sky.place(first).direction, sky.place(second).direction];
-      return (a[0] - b[0]) ** 2 + (a[1] - b[1]) ** 2 + (a[2] - b[2]) ** 2;
+      return angleBetween(sky.place(first).direction, sky.place(second).direction);
     };
+    const squaredChord = (tt: number): number => (2 * Math.sin(separation(tt) / 2)) ** 2;
     const [x, y, z] = direction;
     const samples = x[first].map((firstX, i) => {
       const squared =
@@ -194,19 +198,20 @@ export function appulses({ grid, direction }: SampledSky): ScanRow[] {
         (z[first][i]! - z[second][i]!) ** 2;
       return squared < APPULSE_REGION ** 2 ? squared : NaN;
     });
+    const isFast = first === 'mercury' || first === 'venus' || first === 'mars';
+    const sharpRate = derivative(squaredChord, SHARP_DAYS);
     return extrema(grid, { samples, direct: squaredChord })
-      .filter((root) => root.rising)
-      .flatMap((root) => {
-        const sky = new Sky(root.tt);
-        const separation = angleBetween(sky.place(first).direction, sky.place(second).direction);
-        if (separation >= APPULSE_LIMIT) return [];
+      .filter((root) => root.rising && separation(root.tt) < APPULSE_LIMIT)
+      .map(({ tt: found, curvature }) => {
+        const [from, to] = [found - SHARPENED_WITHIN_DAYS, found + SHARPENED_WITHIN_DAYS];
+        const tt = isFast ? bisect(sharpRate, from, to, -1) : found;
         return {
           kind: 'appulse',
           reckoning: null,
           bodies: [first, second],
-          tt: root.tt,
-          slope: root.curvature / 2 / DEGREE ** 2,
-          value: separation / DEGREE,
+          tt,
+          slope: curvature / 2 / DEGREE ** 2,
+          value: separation(tt) / DEGREE,
         };
       });
   });

@@ -67,7 +67,7 @@ export function rootsOnGrid(grid: Grid, { samples, direct, limit, grazes }: Soug
 }
 
 /** The root between two instants, `f` having the given sign at the first and the other one at the second. */
-function bisect(f: (tt: number) => number, from: number, to: number, signFrom: 1 | -1): number {
+export function bisect(f: (tt: number) => number, from: number, to: number, signFrom: 1 | -1): number {
   let [low, high] = [from, to];
   for (let step = 0; step < BISECTIONS && high - low > ROOT_TOLERANCE_DAYS; step++) {
     const middle = (low + high) / 2;

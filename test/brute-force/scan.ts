@@ -55,7 +55,7 @@ const header = (from: number, to: number): string[] => [
   '# Made by test/brute-force/scan.ts on astronomy-engine 2.1.19 alone (positions, precession, nutation, obliquity).',
   `# Span: TT days since J2000.0 from ${from} (included) to ${to} (not); sampled every ${STEP_DAYS} day.`,
   '# Roots by bisection to 1e-7 day; every least |difference| below 1 degree, and every rate near zero, refined and',
-  '# tested for a hidden pair of roots. Extrema and stations: roots of five-point differences over ±0.5 day.',
+  '# tested for a hidden pair of roots. Extrema and stations: roots of five-point differences over ±0.5 day (appulses ±0.02).',
   '# Apparent places: barycentric, light-time to 1e-9 day, deflection by the Sun (ERFA ld, true direction of the planet',
   '# from the Sun, limiter 1e-6), relativistic aberration (ERFA ab, no potential term), true equator or ecliptic of date.',
   '# Closest, farthest: geometric distance at the same TT. Perihelion, aphelion: the absolute one of each revolution.',
