@@ -16,7 +16,7 @@ export const reckonings = ['longitude', 'right-ascension'] as const;
 export const pairsOf = <Name>(names: readonly Name[]): (readonly [Name, Name])[] =>
   names.flatMap((a, i) => names.slice(i + 1).map((b) => [a, b] as const));
 
-export const isInner = (planet: PlanetName): boolean => planet === 'mercury' || planet === 'venus';
+const isInner = (planet: PlanetName): boolean => planet === 'mercury' || planet === 'venus';
 
 /** Apparent coordinate of a body in a sky. */
 export const coordinateOf =

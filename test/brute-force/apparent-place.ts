@@ -77,7 +77,7 @@ export function timeAt(tt: number): AstroTime {
 }
 
 /** Geometric heliocentric place, J2000 equator, au. */
-export function heliocentric(planet: PlanetName, time: AstroTime): Triple {
+function heliocentric(planet: PlanetName, time: AstroTime): Triple {
   const { x, y, z } = HelioVector(libraryBody[planet], time);
   return [x, y, z];
 }
