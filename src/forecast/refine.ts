@@ -63,19 +63,24 @@ export function nearest(
   return null;
 }
 
-/** Half the base of the parabola through three values: long against rounding, short against the curve's own change. */
-const PARABOLA_STEP_DAYS = 0.05;
-const PARABOLA_PASSES = 2;
+/** Between the five points of a derivative: long against rounding, short against the curve's own change. */
+const DERIVATIVE_STEP_DAYS = 0.05;
+const TURN_PASSES = 2;
 
-/** The turning point of a smooth function near one that is already good to minutes, by parabolas through it. */
+/**
+ * The turning point of a smooth function near one that is already good to minutes, by Newton's method on five-point
+ * derivatives.
+ * Source: Abramowitz & Stegun (1964), table 25.2.
+ */
 export function refineTurn(near: TtDays, value: (tt: TtDays) => number): TtDays {
-  const h = PARABOLA_STEP_DAYS;
+  const h = DERIVATIVE_STEP_DAYS;
   let tt = near;
-  for (let pass = 0; pass < PARABOLA_PASSES; pass++) {
-    const before = value(ttDays(tt - h));
-    const here = value(tt);
-    const after = value(ttDays(tt + h));
-    tt = ttDays(tt + (h * (before - after)) / (2 * (before - 2 * here + after)));
+  for (let pass = 0; pass < TURN_PASSES; pass++) {
+    const at = (k: number): number => value(ttDays(tt + k * h));
+    const [b2, b1, here, a1, a2] = [at(-2), at(-1), at(0), at(1), at(2)];
+    const rate = (8 * (a1 - b1) - (a2 - b2)) / (12 * h);
+    const acceleration = (16 * (a1 + b1) - (a2 + b2) - 30 * here) / (12 * h * h);
+    tt = ttDays(tt - rate / acceleration);
   }
   return tt;
 }
