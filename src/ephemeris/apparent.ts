@@ -3,26 +3,50 @@ import { add, cross, dot, length, scale, subtract } from '../math/index.js';
 import type { Vector } from '../math/index.js';
 import { ttDays } from '../time/index.js';
 import type { TtDays } from '../time/index.js';
-import type { EphemerisSource } from './source.js';
+import type { Geometry } from './geometry.js';
 
 /** Speed of light, au a day (IAU 2012 au, 2019 SI). */
 export const LIGHT_AU_PER_DAY = 173.144_632_684_669_3;
 /** 2GM☉/c², au: the Sun's Schwarzschild radius (IAU 2015 nominal solar mass parameter). */
 const SUN_SCHWARZSCHILD_AU = 1.974_125_743_36e-8;
-/** Half the step of the central difference that gives the Earth's velocity: good to 1e-7 of 20″. */
-const VELOCITY_STEP_DAYS = 0.05;
 const MAX_LIGHT_TIME_STEPS = 8;
-const LIGHT_TIME_TOLERANCE_DAYS = 1e-10;
+/** In which the fastest planet moves by 0.00002″. */
+const LIGHT_TIME_TOLERANCE_DAYS = 2e-9;
 
-/** Geocentric places on the axes of J2000.0 computed straight from a source, and a count of them. */
+/** Where the Earth's centre is, and how fast it moves, at one instant: what all places of that instant share. */
+export interface Observer {
+  readonly tt: TtDays;
+  /** From the barycentre, au. */
+  readonly earth: Vector;
+  /** From the Sun's centre, au. */
+  readonly earthFromSun: Vector;
+  /** About the barycentre, in units of the speed of light. */
+  readonly velocity: Vector;
+}
+
+/** Geocentric places on the axes of J2000.0, and a count of them. */
 export class ApparentPlaces {
   private computed = 0;
+  private lastObserver: Observer | null = null;
 
-  constructor(private readonly source: EphemerisSource) {}
+  constructor(private readonly geometry: Geometry) {}
 
   /** How many apparent places have been computed so far: the effort of a search. */
   get count(): number {
     return this.computed;
+  }
+
+  observer(tt: TtDays): Observer {
+    if (this.lastObserver?.tt === tt) return this.lastObserver;
+    const earth = this.geometry.heliocentricMotion('earth', tt);
+    const sun = this.geometry.sunMotion(tt);
+    this.lastObserver = {
+      tt,
+      earth: add(earth.position, sun.position),
+      earthFromSun: earth.position,
+      velocity: scale(add(earth.velocity, sun.velocity), 1 / LIGHT_AU_PER_DAY),
+    };
+    return this.lastObserver;
   }
 
   /**
@@ -30,7 +54,31 @@ export class ApparentPlaces {
    * catalogues of J2000.0 compare with.
    */
   astrometric(body: Body, tt: TtDays): Vector {
-    const earth = this.barycentric('earth', tt);
+    return this.retarded(body, this.observer(tt));
+  }
+
+  /**
+   * The apparent place: light-time, deflection by the Sun and aberration applied; its direction is the apparent
+   * one, its length the light-time distance, au.
+   *
+   * Source: Urban & Seidelmann (eds.), Explanatory Supplement, 3rd ed. (2013), §7.2.2–7.2.4; deflection and
+   * aberration in the vector form of the IAU SOFA routines `ld` and `ab`.
+   */
+  apparent(body: Body, tt: TtDays): Vector {
+    const observer = this.observer(tt);
+    const place = this.retarded(body, observer);
+    return this.aberrated(body === 'sun' ? place : deflectBySun(place, observer.earthFromSun), observer);
+  }
+
+  /**
+   * The apparent place without the Sun's deflection: smooth even where a body passes behind the Sun, and within
+   * 0.03″ of the apparent one from 15° off it (1.75″ at its limb).
+   */
+  undeflected(body: Body, observer: Observer): Vector {
+    return this.aberrated(this.retarded(body, observer), observer);
+  }
+
+  private retarded(body: Body, { tt, earth }: Observer): Vector {
     let place = subtract(this.barycentric(body, tt), earth);
     let lightTimeDays = length(place) / LIGHT_AU_PER_DAY;
     for (let step = 0; step < MAX_LIGHT_TIME_STEPS; step++) {
@@ -43,44 +91,15 @@ export class ApparentPlaces {
     return place;
   }
 
-  /**
-   * The apparent place: light-time, deflection by the Sun and aberration applied; its direction is the apparent
-   * one, its length the light-time distance, au.
-   *
-   * Source: Urban & Seidelmann (eds.), Explanatory Supplement, 3rd ed. (2013), §7.2.2–7.2.4; deflection and
-   * aberration in the vector form of the IAU SOFA routines `ld` and `ab`.
-   */
-  apparent(body: Body, tt: TtDays): Vector {
-    const earthFromSun = this.source.heliocentric('earth', tt);
-    const place = this.astrometric(body, tt);
-    return this.aberrated(body === 'sun' ? place : deflectBySun(place, earthFromSun), earthFromSun, tt);
-  }
-
-  /**
-   * The apparent place without the Sun's deflection: smooth even where a body passes behind the Sun, and within
-   * 0.03″ of the apparent one from 15° off it (1.75″ at its limb).
-   */
-  undeflected(body: Body, tt: TtDays): Vector {
-    return this.aberrated(this.astrometric(body, tt), this.source.heliocentric('earth', tt), tt);
-  }
-
-  private aberrated(place: Vector, earthFromSun: Vector, tt: TtDays): Vector {
+  private aberrated(place: Vector, { earthFromSun, velocity }: Observer): Vector {
     this.computed++;
-    const velocity = scale(this.earthVelocity(tt), 1 / LIGHT_AU_PER_DAY);
     const distanceAu = length(place);
     return scale(aberrate(scale(place, 1 / distanceAu), velocity, length(earthFromSun)), distanceAu);
   }
 
   private barycentric(body: Body, tt: TtDays): Vector {
-    const sun = this.source.sunFromBarycentre(tt);
-    return body === 'sun' ? sun : add(this.source.heliocentric(body, tt), sun);
-  }
-
-  /** Of the Earth about the barycentre, au a day. */
-  private earthVelocity(tt: TtDays): Vector {
-    const after = this.barycentric('earth', ttDays(tt + VELOCITY_STEP_DAYS));
-    const before = this.barycentric('earth', ttDays(tt - VELOCITY_STEP_DAYS));
-    return scale(subtract(after, before), 1 / (2 * VELOCITY_STEP_DAYS));
+    const sun = this.geometry.sunFromBarycentre(tt);
+    return body === 'sun' ? sun : add(this.geometry.heliocentric(body, tt), sun);
   }
 }
 

@@ -4,6 +4,8 @@
  */
 export class BlockCache<Block> {
   private readonly blocks = new Map<number, Block>();
+  /** Most readers come back to the block they have just read. */
+  private last: { readonly index: number; readonly block: Block } | null = null;
 
   constructor(
     private readonly make: (index: number) => Block,
@@ -11,8 +13,13 @@ export class BlockCache<Block> {
   ) {}
 
   get(index: number): Block {
-    const known = this.blocks.get(index);
-    if (known !== undefined) return known;
+    if (this.last?.index === index) return this.last.block;
+    const block = this.blocks.get(index) ?? this.add(index);
+    this.last = { index, block };
+    return block;
+  }
+
+  private add(index: number): Block {
     if (this.blocks.size >= this.capacity) {
       const oldest = this.blocks.keys().next();
       if (oldest.done !== true) this.blocks.delete(oldest.value);

@@ -30,22 +30,24 @@ const sunShape: BlockShape = { blockDays: 512, nodes: 16 };
  */
 export interface Geometry extends EphemerisSource {
   heliocentricMotion(planet: Planet, tt: TtDays): Motion;
+  sunMotion(tt: TtDays): Motion;
 }
 
 export function geometryOf(source: EphemerisSource): Geometry {
   const orbits = new Map<Planet, VectorTrack>(
     planets.map((planet) => [
       planet,
-      new VectorTrack(shapes[planet], (nodes) => nodes.map((tt) => source.heliocentric(planet, tt))),
+      new VectorTrack(shapes[planet], (tt) => source.heliocentric(planet, tt)),
     ]),
   );
-  const sun = new VectorTrack(sunShape, (nodes) => nodes.map((tt) => source.sunFromBarycentre(tt)));
+  const sun = new VectorTrack(sunShape, (tt) => source.sunFromBarycentre(tt));
   return {
     name: source.name,
     description: source.description,
     heliocentric: (planet, tt): Vector => orbits.get(planet)!.position(tt),
     heliocentricMotion: (planet, tt): Motion => orbits.get(planet)!.motion(tt),
     sunFromBarycentre: (tt): Vector => sun.position(tt),
+    sunMotion: (tt): Motion => sun.motion(tt),
     accuracy: (body) => source.accuracy(body),
   };
 }

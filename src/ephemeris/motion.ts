@@ -1,5 +1,5 @@
 import { rotate, subtract } from '../math/index.js';
-import type { Rotation } from '../math/index.js';
+import type { Jet, Rotation } from '../math/index.js';
 import type { Motion } from './paths.js';
 
 /** A motion on axes that are taken as fixed at the instant. */
@@ -14,3 +14,26 @@ export const subtractMotions = (a: Motion, b: Motion): Motion => ({
   velocity: subtract(a.velocity, b.velocity),
   acceleration: subtract(a.acceleration, b.acceleration),
 });
+
+/**
+ * The longitude about the z axis of a point whose x and y are jets of some parameter, with its derivatives by time.
+ * @param perDay what the parameter grows by in a day
+ */
+export function longitudeOf(x: Jet, y: Jet, perDay: number): Jet {
+  const rho2 = x.value * x.value + y.value * y.value;
+  const rho2Rate = 2 * (x.value * x.rate + y.value * y.rate);
+  const rate = (x.value * y.rate - y.value * x.rate) / rho2;
+  const acceleration = (x.value * y.acceleration - y.value * x.acceleration - rate * rho2Rate) / rho2;
+  return {
+    value: Math.atan2(y.value, x.value),
+    rate: rate * perDay,
+    acceleration: acceleration * perDay * perDay,
+  };
+}
+
+export const longitudeOfMotion = ({ position, velocity, acceleration }: Motion): Jet =>
+  longitudeOf(
+    { value: position.x, rate: velocity.x, acceleration: acceleration.x },
+    { value: position.y, rate: velocity.y, acceleration: acceleration.y },
+    1,
+  );

@@ -1,5 +1,5 @@
 import type { Body } from '../bodies/index.js';
-import type { Vector } from '../math/index.js';
+import type { Jet, Vector } from '../math/index.js';
 import type { TtDays } from '../time/index.js';
 
 /** Axes in which a direction is given; "of date" is the true equator and equinox (nutation included). */
@@ -19,4 +19,6 @@ export interface Motion {
 export interface Paths {
   position(body: Body, frame: Frame, tt: TtDays): Vector;
   motion(body: Body, frame: Frame, tt: TtDays): Motion;
+  /** Right ascension or ecliptic longitude with its derivatives: radians, per day, per day². */
+  longitude(body: Body, frame: Frame, tt: TtDays): Jet;
 }

@@ -1,3 +1,4 @@
+import { longitudeOf } from './motion.js';
 import { chebyshevNodes, chebyshevValue, evaluateChebyshev, fitChebyshev } from '../math/index.js';
 import type { Jet, Vector } from '../math/index.js';
 import { ttDays } from '../time/index.js';
@@ -19,23 +20,28 @@ export interface BlockShape {
  */
 export class VectorTrack {
   private readonly blocks: BlockCache<Float64Array>;
-  private readonly jets: [Jet, Jet, Jet] = [emptyJet(), emptyJet(), emptyJet()];
+  private readonly jets: readonly [Jet, Jet, Jet] = [emptyJet(), emptyJet(), emptyJet()];
+  private readonly samples: readonly [Float64Array, Float64Array, Float64Array];
+  private readonly perDay: number;
 
   constructor(
     private readonly shape: BlockShape,
-    /** The vectors at the nodes of block `index`, in the order of `nodeTimes`. */
-    sample: (nodes: readonly TtDays[], index: number) => readonly Vector[],
+    /** The vector at node `node` of block `block`, the instant of which is `tt`. */
+    private readonly sample: (tt: TtDays, node: number, block: number) => Vector,
   ) {
-    this.blocks = new BlockCache(
-      (index) => fitVectors(sample(nodeTimes(shape, index), index), shape.nodes),
-      KEPT_BLOCKS,
-    );
+    this.blocks = new BlockCache((index) => this.fill(index), KEPT_BLOCKS);
+    this.samples = [
+      new Float64Array(shape.nodes),
+      new Float64Array(shape.nodes),
+      new Float64Array(shape.nodes),
+    ];
+    this.perDay = 2 / shape.blockDays;
   }
 
   position(tt: TtDays): Vector {
     const { blockDays, nodes } = this.shape;
     const index = Math.floor(tt / blockDays);
-    const x = (2 * (tt - index * blockDays)) / blockDays - 1;
+    const x = (tt - index * blockDays) * this.perDay - 1;
     const block = this.blocks.get(index);
     return {
       x: chebyshevValue(block, 0, nodes, x),
@@ -46,14 +52,14 @@ export class VectorTrack {
 
   motion(tt: TtDays): Motion {
     const { blockDays, nodes } = this.shape;
+    const { perDay } = this;
     const index = Math.floor(tt / blockDays);
-    const x = (2 * (tt - index * blockDays)) / blockDays - 1;
+    const x = (tt - index * blockDays) * perDay - 1;
     const block = this.blocks.get(index);
     const [jx, jy, jz] = this.jets;
     evaluateChebyshev(block, 0, nodes, x, jx);
     evaluateChebyshev(block, nodes, nodes, x, jy);
     evaluateChebyshev(block, 2 * nodes, nodes, x, jz);
-    const perDay = 2 / blockDays;
     const perDay2 = perDay * perDay;
     return {
       position: { x: jx.value, y: jy.value, z: jz.value },
@@ -65,31 +71,39 @@ export class VectorTrack {
       },
     };
   }
+
+  /** The vector's longitude about the z axis, radians in (−π, π], with its derivatives. */
+  longitude(tt: TtDays): Jet {
+    const { blockDays, nodes } = this.shape;
+    const index = Math.floor(tt / blockDays);
+    const x = (tt - index * blockDays) * this.perDay - 1;
+    const block = this.blocks.get(index);
+    const [jx, jy] = this.jets;
+    evaluateChebyshev(block, 0, nodes, x, jx);
+    evaluateChebyshev(block, nodes, nodes, x, jy);
+    return longitudeOf(jx, jy, this.perDay);
+  }
+
+  private fill(index: number): Float64Array {
+    const { nodes } = this.shape;
+    const [xs, ys, zs] = this.samples;
+    for (let k = 0; k < nodes; k++) {
+      const { x, y, z } = this.sample(nodeTime(this.shape, index, k), k, index);
+      xs[k] = x;
+      ys[k] = y;
+      zs[k] = z;
+    }
+    const block = new Float64Array(3 * nodes);
+    fitChebyshev(xs, block, 0);
+    fitChebyshev(ys, block, nodes);
+    fitChebyshev(zs, block, 2 * nodes);
+    return block;
+  }
 }
 
-/** The instants at which block `index` is sampled. */
-export function nodeTimes({ blockDays, nodes }: BlockShape, index: number): TtDays[] {
-  return Array.from(chebyshevNodes(nodes), (x) => ttDays((index + (x + 1) / 2) * blockDays));
-}
-
-function fitVectors(vectors: readonly Vector[], nodes: number): Float64Array {
-  const block = new Float64Array(3 * nodes);
-  fitChebyshev(
-    Float64Array.from(vectors, (v) => v.x),
-    block,
-    0,
-  );
-  fitChebyshev(
-    Float64Array.from(vectors, (v) => v.y),
-    block,
-    nodes,
-  );
-  fitChebyshev(
-    Float64Array.from(vectors, (v) => v.z),
-    block,
-    2 * nodes,
-  );
-  return block;
+/** The instant of one node of one block. */
+export function nodeTime({ blockDays, nodes }: BlockShape, block: number, node: number): TtDays {
+  return ttDays((block + (chebyshevNodes(nodes)[node]! + 1) / 2) * blockDays);
 }
 
 function emptyJet(): Jet {

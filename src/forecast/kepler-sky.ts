@@ -1,7 +1,7 @@
 import { keplerMotion, keplerTableFor } from '../cycles/index.js';
 import type { ElementTable } from '../cycles/index.js';
-import type { Body } from '../bodies/index.js';
-import { rotateMotion, subtractMotions } from '../ephemeris/index.js';
+import type { Body, Planet } from '../bodies/index.js';
+import { longitudeOfMotion, rotateMotion, subtractMotions } from '../ephemeris/index.js';
 import type { Frame, Motion } from '../ephemeris/index.js';
 import { RADIANS_PER_ARCSEC } from '../math/index.js';
 import type { Rotation } from '../math/index.js';
@@ -19,22 +19,37 @@ const OBLIQUITY_ARCSEC_PER_CENTURY = -46.836769;
  * @param table one of Standish's tables throughout, or `by-date`: Table 1 within 1800–2050, Table 2 outside
  */
 export function keplerSky(table: ElementTable | 'by-date'): SkyModel {
-  const orbit = (planet: Exclude<Body, 'sun'>, tt: TtDays): Motion =>
+  const orbit = (planet: Planet, tt: TtDays): Motion =>
     keplerMotion(planet, tt, table === 'by-date' ? keplerTableFor(tt) : table);
-  const still: Motion = {
-    position: { x: 0, y: 0, z: 0 },
-    velocity: { x: 0, y: 0, z: 0 },
-    acceleration: { x: 0, y: 0, z: 0 },
+  // Two bodies are asked for at one instant, one after the other, on the same axes and from the same Earth.
+  const earth = rememberLast((tt) => orbit('earth', tt));
+  const axes = {
+    j2000: rememberLast((tt) => fromEclipticJ2000('j2000', tt)),
+    'equator-of-date': rememberLast((tt) => fromEclipticJ2000('equator-of-date', tt)),
+    'ecliptic-of-date': rememberLast((tt) => fromEclipticJ2000('ecliptic-of-date', tt)),
   };
+  const geocentric = (body: Body, frame: Frame, tt: TtDays): Motion =>
+    rotateMotion(axes[frame](tt), subtractMotions(body === 'sun' ? still : orbit(body, tt), earth(tt)));
   return {
-    geocentric: (body, frame, tt) =>
-      rotateMotion(
-        fromEclipticJ2000(frame, tt),
-        subtractMotions(body === 'sun' ? still : orbit(body, tt), orbit('earth', tt)),
-      ),
-    heliocentric: (planet, tt) => rotateMotion(fromEclipticJ2000('j2000', tt), orbit(planet, tt)),
-    heliocentricOfDate: (planet, tt) =>
-      rotateMotion(fromEclipticJ2000('ecliptic-of-date', tt), orbit(planet, tt)),
+    geocentric,
+    longitude: (body, frame, tt) => longitudeOfMotion(geocentric(body, frame, tt)),
+    heliocentric: (planet, tt) => rotateMotion(axes.j2000(tt), orbit(planet, tt)),
+    heliocentricLongitude: (planet, tt) =>
+      longitudeOfMotion(rotateMotion(axes['ecliptic-of-date'](tt), orbit(planet, tt))),
+  };
+}
+
+const still: Motion = {
+  position: { x: 0, y: 0, z: 0 },
+  velocity: { x: 0, y: 0, z: 0 },
+  acceleration: { x: 0, y: 0, z: 0 },
+};
+
+function rememberLast<Value>(make: (tt: TtDays) => Value): (tt: TtDays) => Value {
+  let last: { readonly tt: TtDays; readonly value: Value } | null = null;
+  return (tt) => {
+    if (last?.tt !== tt) last = { tt, value: make(tt) };
+    return last.value;
   };
 }
 

@@ -9,7 +9,7 @@ import type { TtDays } from '../time/index.js';
 import type { Reckoning } from './event.js';
 import type { KindName } from './kind-names.js';
 import { brilliancyErrors, magnitudeSignal, phaseAngleOfVenusDeg } from './brilliancy.js';
-import { distanceJet, longitudeDifference, longitudeJet, separationJet, separationOf } from './signal.js';
+import { distanceJet, longitudeDifference, separationJet, separationOf } from './signal.js';
 import type { Signal, SkyModel } from './signal.js';
 import {
   differenceErrors,
@@ -92,8 +92,8 @@ function sunAlignment(
       (sky, [planet], reckoning) =>
       (tt) =>
         longitudeDifference(
-          sky.geocentric(planet, frameOf(reckoning), tt),
-          sky.geocentric('sun', frameOf(reckoning), tt),
+          sky.longitude(planet, frameOf(reckoning), tt),
+          sky.longitude('sun', frameOf(reckoning), tt),
           target,
         ),
     exactValue: exactDifference(target),
@@ -124,7 +124,7 @@ function greatestElongation(side: 'east' | 'west'): Kind {
     sought: 'maximum',
     search: 'all-in-cycle',
     exactValue: null,
-    stepDays: ([planet]) => (planet === 'mercury' ? 4 : 8),
+    stepDays: loopStepDays,
     accepts: (sky, [planet], tt) => isEastOfSun(sky, planet, tt) === (side === 'east'),
     reports: always,
     errors: separationErrors,
@@ -141,11 +141,11 @@ function station(name: 'stationary-retrograde' | 'stationary-direct'): Kind {
     signal:
       (sky, [planet], reckoning) =>
       (tt) =>
-        longitudeJet(sky.geocentric(planet, frameOf(reckoning), tt)),
+        sky.longitude(planet, frameOf(reckoning), tt),
     sought: name === 'stationary-retrograde' ? 'maximum' : 'minimum',
     search: 'all-in-cycle',
     exactValue: null,
-    stepDays: ([planet]) => (planet === 'mercury' ? 3 : 8),
+    stepDays: loopStepDays,
     accepts: always,
     reports: always,
     errors: ownLongitudeErrors,
@@ -166,7 +166,7 @@ function distanceExtreme(name: 'closest-approach' | 'farthest'): Kind {
     sought: name === 'closest-approach' ? 'minimum' : 'maximum',
     search: 'all-in-cycle',
     exactValue: null,
-    stepDays: ([planet]) => (planet === 'mercury' ? 4 : 8),
+    stepDays: loopStepDays,
     accepts: always,
     reports: always,
     errors: distanceErrors,
@@ -235,14 +235,14 @@ function conjunctionOfTwo(name: 'conjunction-ra' | 'conjunction-longitude'): Kin
       (sky, [a, b]) =>
       (tt) =>
         longitudeDifference(
-          sky.geocentric(a, frameOf(reckoning), tt),
-          sky.geocentric(b!, frameOf(reckoning), tt),
+          sky.longitude(a, frameOf(reckoning), tt),
+          sky.longitude(b!, frameOf(reckoning), tt),
           0,
         ),
     exactValue: exactDifference(0),
     sought: 'zero',
     search: 'all-in-cycle',
-    stepDays: pairStepDays,
+    stepDays: loopStepDays,
     accepts: always,
     reports: always,
     errors: differenceErrors,
@@ -265,7 +265,7 @@ const appulse: Kind = {
       2 * Math.sin(angleBetween(sky.places.apparent(a, tt), sky.places.apparent(b!, tt)) / 2) ** 2,
   sought: 'minimum',
   search: 'all-in-cycle',
-  stepDays: pairStepDays,
+  stepDays: loopStepDays,
   accepts: always,
   reports: (sky, [a, b], tt, { withinDeg }) => {
     const jet = separationJet(
@@ -289,7 +289,7 @@ function heliocentricAlignment(name: 'heliocentric-conjunction' | 'heliocentric-
     signal:
       (sky, [a, b]) =>
       (tt) =>
-        longitudeDifference(sky.heliocentricOfDate(a, tt), sky.heliocentricOfDate(b!, tt), target),
+        longitudeDifference(sky.heliocentricLongitude(a, tt), sky.heliocentricLongitude(b!, tt), target),
     sought: 'zero',
     search: 'one-a-cycle',
     exactValue: null,
@@ -357,9 +357,13 @@ function pairNumbering([a, b]: Subject): Numbering {
   return { cycle, meanEstimate: (n) => (meanIsEstimate ? meanInstant(cycle, n) : null) };
 }
 
-/** Mercury's loops turn within three weeks; the rest within months. */
-function pairStepDays(subject: Subject): number {
-  return subject.includes('mercury') ? 3 : 8;
+/**
+ * A fifth of the shortest loop that the subject makes in the sky, or less: Mercury turns back for 20 days, Venus for
+ * 41, Mars for 60, the rest for longer.
+ */
+function loopStepDays(subject: Subject): number {
+  if (subject.includes('mercury')) return 3;
+  return subject.includes('venus') ? 8 : 12;
 }
 
 function nearestMean(cycle: MeanCycle, tt: TtDays): TtDays {
@@ -373,5 +377,5 @@ function nearer(to: TtDays, a: TtDays, b: TtDays): TtDays {
 /** East: the body follows the Sun across the sky and stands in the evening. */
 function isEastOfSun(sky: SkyModel, body: Body, tt: TtDays): boolean {
   const frame = 'ecliptic-of-date';
-  return longitudeDifference(sky.geocentric(body, frame, tt), sky.geocentric('sun', frame, tt), 0).value > 0;
+  return longitudeDifference(sky.longitude(body, frame, tt), sky.longitude('sun', frame, tt), 0).value > 0;
 }

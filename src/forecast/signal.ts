@@ -9,38 +9,23 @@ import type { TtDays } from '../time/index.js';
 export interface SkyModel {
   /** Geocentric; apparent for the ephemeris, geometric for Kepler orbits. au, days. */
   geocentric(body: Body, frame: Frame, tt: TtDays): Motion;
+  /** Right ascension or ecliptic longitude of the same, radians. */
+  longitude(body: Body, frame: Frame, tt: TtDays): Jet;
   /** Geometric, axes of J2000.0. */
   heliocentric(planet: Planet, tt: TtDays): Motion;
-  /** Geometric, ecliptic and equinox of date. */
-  heliocentricOfDate(planet: Planet, tt: TtDays): Motion;
+  /** Geometric, ecliptic and equinox of date, radians. */
+  heliocentricLongitude(planet: Planet, tt: TtDays): Jet;
 }
 
 /** A smooth function of TT with its first two time derivatives: what a kind of event looks for. */
 export type Signal = (tt: TtDays) => Jet;
 
-/** A vector's longitude about the z axis, radians in (−π, π], with its derivatives. */
-export function longitudeJet({ position, velocity, acceleration }: Motion): Jet {
-  const { x, y } = position;
-  const rho2 = x * x + y * y;
-  const rho2Rate = 2 * (x * velocity.x + y * velocity.y);
-  const rate = (x * velocity.y - y * velocity.x) / rho2;
-  return {
-    value: Math.atan2(y, x),
-    rate,
-    acceleration: (x * acceleration.y - y * acceleration.x - rate * rho2Rate) / rho2,
-  };
-}
-
-/** longitude(a) − longitude(b) − target, wrapped into (−π, π]. */
-export function longitudeDifference(a: Motion, b: Motion, target: number): Jet {
-  const ja = longitudeJet(a);
-  const jb = longitudeJet(b);
-  return {
-    value: wrapPi(ja.value - jb.value - target),
-    rate: ja.rate - jb.rate,
-    acceleration: ja.acceleration - jb.acceleration,
-  };
-}
+/** a − b − target for two longitudes, wrapped into (−π, π]. */
+export const longitudeDifference = (a: Jet, b: Jet, target: number): Jet => ({
+  value: wrapPi(a.value - b.value - target),
+  rate: a.rate - b.rate,
+  acceleration: a.acceleration - b.acceleration,
+});
 
 /** Half the squared length of a motion: it turns where the length turns, and is smooth even where that vanishes. */
 export const distanceJet = ({ position, velocity, acceleration }: Motion): Jet => ({

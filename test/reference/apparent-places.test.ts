@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Body } from '../../src/bodies/index.js';
-import { ApparentPlaces, librarySource, rotationTo } from '../../src/ephemeris/index.js';
+import { ApparentPlaces, geometryOf, librarySource, rotationTo } from '../../src/ephemeris/index.js';
 import {
   RADIANS_PER_DEGREE,
   RADIANS_PER_HOUR,
@@ -23,7 +23,7 @@ const ACCURACIES_ALLOWED = 1.5;
 /** Light-time or geometric distance, which the tables do not always say, differ by 1e-4 for Mercury at its fastest. */
 const DISTANCE_TOLERANCE = 2e-4;
 
-const places = new ApparentPlaces(librarySource);
+const places = new ApparentPlaces(geometryOf(librarySource));
 const jdTt = (jd: number) => ttDays(jd - JD_J2000);
 const hms = (h: number, m: number, s: number) => (h + m / 60 + s / 3600) * RADIANS_PER_HOUR;
 const dms = (sign: 1 | -1, d: number, m: number, s: number) =>
