@@ -75,7 +75,11 @@ export function anomalisticCycle(planet: Planet, apsis: 'perihelion' | 'aphelion
 }
 
 /** The mean cycle in which two planets line up as seen from the Sun, on one side or on opposite ones. */
-export function heliocentricCycle(a: Planet, b: Planet, configuration: 'conjunction' | 'opposition'): MeanCycle {
+export function heliocentricCycle(
+  a: Planet,
+  b: Planet,
+  configuration: 'conjunction' | 'opposition',
+): MeanCycle {
   const [faster, slower] = rateOf(a) > rateOf(b) ? [a, b] : [b, a];
   return leadCycle(faster, slower, configuration === 'conjunction' ? 0 : 180);
 }

@@ -16,7 +16,12 @@ export interface MeanElements {
   readonly perihelionLongitudeDeg: Linear;
   readonly nodeLongitudeDeg: Linear;
   /** Table 2b: b·T² + c·cos(f·T) + s·sin(f·T), degrees, added to the mean anomaly; f in degrees per century. */
-  readonly anomalyTerms?: { readonly b: number; readonly c: number; readonly s: number; readonly fDeg: number };
+  readonly anomalyTerms?: {
+    readonly b: number;
+    readonly c: number;
+    readonly s: number;
+    readonly fDeg: number;
+  };
 }
 
 /** Value at J2000.0 and change per Julian century. */

@@ -84,7 +84,11 @@ export function keplerMotion(planet: Planet, tt: TtDays, table: ElementTable): O
 }
 
 /** From the orbit's own plane (x to perihelion) to the ecliptic. */
-function orbitToEcliptic(argument: number, node: number, inclination: number): (x: number, y: number) => Vector {
+function orbitToEcliptic(
+  argument: number,
+  node: number,
+  inclination: number,
+): (x: number, y: number) => Vector {
   const [sw, cw] = [Math.sin(argument), Math.cos(argument)];
   const [sn, cn] = [Math.sin(node), Math.cos(node)];
   const [si, ci] = [Math.sin(inclination), Math.cos(inclination)];

@@ -19,7 +19,8 @@ export function meanCycleOf(angleDeg: number, ratePerDayDeg: number, targetDeg: 
   return { epoch: ttDays(nearestDeg / ratePerDayDeg), periodDays: 360 / ratePerDayDeg };
 }
 
-export const meanInstant = ({ epoch, periodDays }: MeanCycle, n: number): TtDays => ttDays(epoch + n * periodDays);
+export const meanInstant = ({ epoch, periodDays }: MeanCycle, n: number): TtDays =>
+  ttDays(epoch + n * periodDays);
 
 /** The number of the cycle whose mean instant is nearest. */
 export const cycleNumberAt = ({ epoch, periodDays }: MeanCycle, tt: TtDays): number =>

@@ -3,7 +3,8 @@ import { angleBetween, bracketedRoot, degreesFromRadians, length, scale, subtrac
 import { ttDays } from '../time/index.js';
 import type { TtDays } from '../time/index.js';
 import type { Interval } from './event.js';
-import { venusMagnitude } from './magnitude.js';
+import { venusMagnitude } from './circumstances/index.js';
+import type { Illumination } from './circumstances/index.js';
 import type { Signal, SkyModel } from './signal.js';
 import type { SignalErrors } from './uncertainty.js';
 
@@ -14,14 +15,8 @@ const LEVEL_MAGNITUDES = 0.005;
 /** No plateau is longer than this on either side. */
 const PLATEAU_REACH_DAYS = 15;
 
-interface VenusNow {
-  readonly sunDistanceAu: number;
-  readonly earthDistanceAu: number;
-  readonly phaseDeg: number;
-}
-
 /** Venus, as the light shows it to the Earth: where it was the light-time ago. */
-function venusNow(sky: SkyModel, tt: TtDays): VenusNow {
+function venusLight(sky: SkyModel, tt: TtDays): Illumination {
   const venus = sky.heliocentric('venus', tt);
   const earth = sky.heliocentric('earth', tt).position;
   const lightTimeDays = length(subtract(venus.position, earth)) / LIGHT_AU_PER_DAY;
@@ -31,12 +26,9 @@ function venusNow(sky: SkyModel, tt: TtDays): VenusNow {
   return { sunDistanceAu, earthDistanceAu, phaseDeg: degreesFromRadians(angleBetween(fromSun, fromEarth)) };
 }
 
-export const phaseAngleOfVenusDeg = (sky: SkyModel, tt: TtDays): number => venusNow(sky, tt).phaseDeg;
+export const phaseAngleOfVenusDeg = (sky: SkyModel, tt: TtDays): number => venusLight(sky, tt).phaseDeg;
 
-function magnitudeAt(sky: SkyModel, tt: TtDays): number {
-  const { sunDistanceAu, earthDistanceAu, phaseDeg } = venusNow(sky, tt);
-  return venusMagnitude(sunDistanceAu, earthDistanceAu, phaseDeg);
-}
+const magnitudeAt = (sky: SkyModel, tt: TtDays): number => venusMagnitude(venusLight(sky, tt));
 
 /** The magnitude of Venus; its minima are the greatest brilliancies. */
 export function magnitudeSignal(sky: SkyModel): Signal {

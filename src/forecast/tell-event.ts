@@ -1,12 +1,14 @@
 import type { Planet, SkyPlanet } from '../bodies/index.js';
+import { rotate } from '../math/index.js';
 import { localViewer } from '../sky/index.js';
 import type { Site } from '../sky/index.js';
-import { utcFromTt, utcUncertaintySeconds } from '../time/index.js';
-import type { TtDays } from '../time/index.js';
+import { SECONDS_PER_DAY, ttDays, utcFromTt, utcUncertaintySeconds } from '../time/index.js';
 import { brilliancyPlateau } from './brilliancy.js';
 import { bodyCircumstances, heliocentricCircumstances, pairCircumstances } from './circumstances/index.js';
+import type { SkyGeometry } from './circumstances/index.js';
 import type { Circumstances, ForecastEvent, Interval } from './event.js';
 import { eventId } from './identity.js';
+import type { KindName } from './kind-names.js';
 import { marsCloseness } from './mars-closeness.js';
 import type { Finding } from './search.js';
 import type { TrackedSky } from './tracked-sky.js';
@@ -75,7 +77,7 @@ function circumstancesOf({ kind, subject, tt }: Finding, sky: TrackedSky): Circu
       return {
         about: 'one-body',
         ...bodyCircumstances(a as SkyPlanet, tt, geometryFor(sky)),
-        ...(kind.tellsCloseness && a === 'mars' ? { closeness: marsCloseness(tt) } : {}),
+        ...(closenessKinds.includes(kind.name) && a === 'mars' ? { closeness: marsCloseness(tt) } : {}),
       };
     case 'two-bodies':
       return pairCircumstances(a as SkyPlanet, b as SkyPlanet, tt, geometryFor(sky));
@@ -84,10 +86,14 @@ function circumstancesOf({ kind, subject, tt }: Finding, sky: TrackedSky): Circu
   }
 }
 
+/** Where it matters how near Mars comes. */
+const closenessKinds: readonly KindName[] = ['opposition', 'closest-approach'];
+
 /** What circumstances read, on exact places. */
 const geometryFor = (sky: TrackedSky): SkyGeometry => ({
   apparent: (body, frame, tt) => sky.apparent(body, frame, tt),
   astrometric: (body, tt) => sky.places.astrometric(body, tt),
   heliocentric: (planet, tt) => sky.geometry.heliocentric(planet, tt),
-  heliocentricEclipticOfDate: (planet, tt) => sky.heliocentricOfDate(planet, tt).position,
+  heliocentricEclipticOfDate: (planet, tt) =>
+    rotate(sky.tracks.rotation('ecliptic-of-date', tt), sky.geometry.heliocentric(planet, tt)),
 });

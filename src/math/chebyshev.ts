@@ -3,24 +3,31 @@
  * Source: Press et al., Numerical Recipes, 3rd ed. (2007), §5.8 (coefficients) and §5.9 (derivatives).
  */
 
-/** The n interpolation nodes in [−1, 1], in falling order. */
-export function chebyshevNodes(n: number): Float64Array {
-  return Float64Array.from({ length: n }, (_, k) => Math.cos((Math.PI * (k + 0.5)) / n));
+/** What every fit of one order shares. */
+interface Order {
+  readonly nodes: Float64Array;
+  /** cos(π j (k + ½) / n), row j, column k. */
+  readonly cosines: Float64Array;
 }
 
-const cosineTables = new Map<number, Float64Array>();
+const orders = new Map<number, Order>();
 
-/** cos(π j (k + ½) / n), row j, column k: the same for every fit of the same order. */
-function cosineTable(n: number): Float64Array {
-  let table = cosineTables.get(n);
-  if (table === undefined) {
-    table = Float64Array.from({ length: n * n }, (_, i) =>
-      Math.cos((Math.PI * Math.floor(i / n) * ((i % n) + 0.5)) / n),
-    );
-    cosineTables.set(n, table);
+function orderOf(n: number): Order {
+  let order = orders.get(n);
+  if (order === undefined) {
+    order = {
+      nodes: Float64Array.from({ length: n }, (_, k) => Math.cos((Math.PI * (k + 0.5)) / n)),
+      cosines: Float64Array.from({ length: n * n }, (_, i) =>
+        Math.cos((Math.PI * Math.floor(i / n) * ((i % n) + 0.5)) / n),
+      ),
+    };
+    orders.set(n, order);
   }
-  return table;
+  return order;
 }
+
+/** The n interpolation nodes in [−1, 1], in falling order. Shared: not to be written to. */
+export const chebyshevNodes = (n: number): Float64Array => orderOf(n).nodes;
 
 /**
  * Writes into `coefficients[offset … offset+n−1]` the polynomial that takes the given values at the n nodes.
@@ -28,10 +35,10 @@ function cosineTable(n: number): Float64Array {
  */
 export function fitChebyshev(values: Float64Array, coefficients: Float64Array, offset: number): void {
   const n = values.length;
-  const table = cosineTable(n);
+  const { cosines } = orderOf(n);
   for (let j = 0; j < n; j++) {
     let sum = 0;
-    for (let k = 0; k < n; k++) sum += values[k]! * table[j * n + k]!;
+    for (let k = 0; k < n; k++) sum += values[k]! * cosines[j * n + k]!;
     coefficients[offset + j] = (j === 0 ? 1 : 2) * (sum / n);
   }
 }

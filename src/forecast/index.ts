@@ -1,0 +1,10 @@
+export type * from './event.js';
+export { DEFAULT_WITHIN_DEG, forecast } from './forecast.js';
+export type { ForecastRequest } from './forecast.js';
+export { cycleLabel } from './identity.js';
+export { kindNames } from './kind-names.js';
+export type { KindName } from './kind-names.js';
+export { NoSuchPairError, residuals } from './residuals.js';
+export type { ResidualRequest, ResidualRow, ResidualSeries, Spread } from './residuals.js';
+export { trackedSky } from './tracked-sky.js';
+export type { TrackedSky } from './tracked-sky.js';
