@@ -36,7 +36,7 @@ const boundaries = Object.entries(rooms).map(([room, below]) => {
                 ]
               : []),
             {
-              regex: `^\\.\\.\\/(?!.*index\\.js$)`,
+              regex: `^(?:\\.\\./)+(?:${Object.keys(rooms).join('|')})/(?!(?:[a-z-]+/)?index\\.js$)`,
               message: "Enter another room by its index.js, not by a file inside it.",
             },
             ...(pureRooms.includes(room)

@@ -28,7 +28,7 @@ export type Subject = readonly [Planet] | readonly [Planet, Planet];
 export interface Numbering {
   readonly cycle: MeanCycle;
   /** The mean estimate of cycle n, or null where the mean cycle numbers the event but does not date it. */
-  meanEstimate(n: number, near: TtDays): TtDays | null;
+  readonly meanEstimate: (n: number, near: TtDays) => TtDays | null;
 }
 
 /**
