@@ -88,7 +88,7 @@ export function circumstancesLine(event: ForecastEvent): string {
         `${fixed(circumstances.leastElongationDeg, 0)}° from the Sun`,
       ].join(', ');
     case 'heliocentric':
-      return `seen from the Sun at longitude ${fixed(circumstances.bodies[0].heliocentricLongitudeDeg, 1)}°`;
+      return `heliocentric longitude ${fixed(circumstances.bodies[0].heliocentricLongitudeDeg, 1)}°`;
   }
 }
 

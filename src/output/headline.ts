@@ -27,6 +27,10 @@ export function headlineOf(event: ForecastEvent): string {
   const zone = home?.zone ?? 'UTC';
   const on = tellInstant(event.utc, event.uncertaintySeconds.utc, zone).longDate;
   const look = home === undefined ? '' : ` ${home.verdict}`;
+  if (circumstances.about === 'heliocentric') {
+    const sides = event.kind === 'heliocentric-conjunction' ? 'on one side of' : 'on opposite sides of';
+    return `${first!} and ${second!} stand ${sides} the Sun on ${on}.`;
+  }
   if (!isObservable(event)) {
     const elongationDeg = leastElongationDeg(event);
     const why =

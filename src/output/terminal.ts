@@ -17,10 +17,23 @@ const HOURS_BELOW_DAYS = 2;
 
 interface TerminalColumn {
   readonly cell: (event: ForecastEvent) => string;
-  readonly style: keyof TerminalStyle | null;
-  /** The first to go on a narrow terminal is the one with the highest number. */
-  readonly sacrifice: number;
+  /** What is written instead on a narrow terminal; nothing by default. */
+  readonly short?: (event: ForecastEvent) => string;
+  readonly tone: keyof TerminalStyle | null;
 }
+
+/** The columns by the order in which a narrow terminal gives them up, the first to go last. */
+const columnsFor = (zone: string): readonly TerminalColumn[] => [
+  { cell: (event) => when(event, zone), tone: null },
+  { cell: ({ uncertaintySeconds }) => uncertaintyShort(uncertaintySeconds.utc), tone: 'quiet' },
+  { cell: ({ kind }) => kind, tone: 'strong' },
+  { cell: (event) => `${bodiesWords(event)}, ${circumstancesLine(event)}`, short: bodiesWords, tone: null },
+  { cell: cycleWords, tone: 'quiet' },
+  { cell: ({ residualDays }) => residualWords('mean', residualDays.mean), tone: 'quiet' },
+  { cell: ({ residualDays }) => residualWords('kepler', residualDays.kepler), tone: 'quiet' },
+];
+/** The first columns stay whatever happens. */
+const ALWAYS_KEPT = 4;
 
 /**
  * One line an event, aligned, at most `width` columns: a narrower terminal loses columns of data, and what is still
@@ -32,47 +45,43 @@ export function terminalLines(
   width: number,
   style: TerminalStyle,
 ): string[] {
-  const zone = site?.zone ?? 'UTC';
-  const columns: readonly TerminalColumn[] = [
-    { cell: (event) => when(event, zone), style: null, sacrifice: 0 },
-    {
-      cell: ({ uncertaintySeconds }) => uncertaintyShort(uncertaintySeconds.utc),
-      style: 'quiet',
-      sacrifice: 2,
-    },
-    { cell: ({ kind }) => kind, style: 'strong', sacrifice: 0 },
-    { cell: bodiesWords, style: null, sacrifice: 0 },
-    { cell: circumstancesLine, style: null, sacrifice: 1 },
-    { cell: cycleWords, style: 'quiet', sacrifice: 4 },
-    { cell: ({ residualDays }) => residualWords('mean', residualDays.mean), style: 'quiet', sacrifice: 5 },
-    {
-      cell: ({ residualDays }) => residualWords('kepler', residualDays.kepler),
-      style: 'quiet',
-      sacrifice: 6,
-    },
+  const columns = columnsFor(site?.zone ?? 'UTC');
+  const full = columns.map(({ cell, tone }) => filled(events.map(cell), tone));
+  const short = columns.map(({ cell, short: shorter, tone }) => filled(events.map(shorter ?? cell), tone));
+  const choices = [
+    ...columns.map((_, i) => full.slice(0, columns.length - i)).filter((kept) => kept.length >= ALWAYS_KEPT),
+    short.slice(0, ALWAYS_KEPT),
   ];
-  const table = columns.map((column) => {
-    const cells = events.map(column.cell);
-    return { ...column, cells, width: Math.max(0, ...cells.map((cell) => cell.length)) };
-  });
-  const kept = [...table];
-  const total = () => kept.reduce((sum, column) => sum + column.width + 2, -2);
-  while (total() > width) {
-    const last = kept.reduce((worst, column) => (column.sacrifice > worst.sacrifice ? column : worst));
-    if (last.sacrifice === 0) break;
-    kept.splice(kept.indexOf(last), 1);
-  }
-  return events.map((_, row) => {
-    let room = width;
-    return kept
-      .map(({ cells, width: wide, style: tone }) => {
-        const text = cells[row]!.padEnd(wide).slice(0, Math.max(0, room));
-        room -= wide + 2;
-        return tone === null ? text : style[tone](text);
-      })
-      .join('  ')
-      .trimEnd();
-  });
+  const chosen = choices.find((kept) => widthOf(kept) <= width) ?? short.slice(0, ALWAYS_KEPT);
+  return events.map((_, row) => line(chosen, row, width, style));
+}
+
+interface FilledColumn {
+  readonly cells: readonly string[];
+  readonly width: number;
+  readonly tone: keyof TerminalStyle | null;
+}
+
+const filled = (cells: readonly string[], tone: keyof TerminalStyle | null): FilledColumn => ({
+  cells,
+  width: cells.reduce((widest, cell) => Math.max(widest, cell.length), 0),
+  tone,
+});
+
+const GAP = '  ';
+const widthOf = (columns: readonly FilledColumn[]): number =>
+  columns.reduce((sum, { width }) => sum + width + GAP.length, -GAP.length);
+
+function line(columns: readonly FilledColumn[], row: number, width: number, style: TerminalStyle): string {
+  let room = width;
+  return columns
+    .map(({ cells, width: wide, tone }) => {
+      const text = cells[row]!.padEnd(wide).slice(0, Math.max(0, room));
+      room -= wide + GAP.length;
+      return tone === null ? text : style[tone](text);
+    })
+    .join(GAP)
+    .trimEnd();
 }
 
 function when({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
