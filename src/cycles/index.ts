@@ -6,3 +6,6 @@ export { eccentricAnomaly, keplerMotion } from './kepler.js';
 export type { OrbitalMotion } from './kepler.js';
 export { cycleNumberAt, cyclesOverlapping, meanInstant, stretchOf } from './mean-cycle.js';
 export type { MeanCycle } from './mean-cycle.js';
+export { CALENDAR_YEAR_DAYS, nearRepeats } from './near-repeats.js';
+export type { NearRepeat } from './near-repeats.js';
+export { PeriodError, siderealPeriodDays, synodicPeriodDays, synodicPeriodOf } from './period.js';
