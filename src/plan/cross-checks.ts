@@ -1,0 +1,110 @@
+import { oneOf, quoted, readInstant } from './words/index.js';
+import { fieldOf, valueAt } from './issue-words.js';
+import type { Path } from './yaml-document.js';
+
+/** A fault between fields, at the field that should change. */
+export interface CrossFault {
+  readonly path: Path;
+  readonly problem: string;
+}
+
+/**
+ * What no single field can tell. Runs on the values as they were read, whatever else is wrong with them: a field that
+ * is itself at fault is passed over here.
+ */
+export function crossFaults(root: unknown): CrossFault[] {
+  return [
+    ...spansThatEndTooSoon(root),
+    ...holidaysThatEndTooSoon(root),
+    ...siteIdsTwice(root),
+    ...homeNowhere(root),
+    ...impossiblePairs(root),
+  ];
+}
+
+function spansThatEndTooSoon(root: unknown): CrossFault[] {
+  return [['span'], ['residuals', 'span']].flatMap((path) => {
+    const [from, to] = [wordAt(root, [...path, 'from']), wordAt(root, [...path, 'to'])];
+    if (from === null || to === null) return [];
+    const [start, end] = [readInstant(from, null), readInstant(to, null)];
+    return 'value' in start && 'value' in end && end.value <= start.value
+      ? [
+          {
+            path: [...path, 'to'],
+            problem: `${quoted(to)} is not after ${quoted(from)}: the end of a span is not in it, write a later one`,
+          },
+        ]
+      : [];
+  });
+}
+
+function holidaysThatEndTooSoon(root: unknown): CrossFault[] {
+  return listAt(root, ['schoolHolidays']).flatMap((_, i) => {
+    const path = ['schoolHolidays', i];
+    const [from, to] = [wordAt(root, [...path, 'from']), wordAt(root, [...path, 'to'])];
+    return from !== null && to !== null && to < from
+      ? [
+          {
+            path: [...path, 'to'],
+            problem: `${quoted(to)} is before ${quoted(from)}: write the last day of the holidays`,
+          },
+        ]
+      : [];
+  });
+}
+
+function siteIdsTwice(root: unknown): CrossFault[] {
+  const first = new Map<string, number>();
+  return siteIds(root).flatMap((id, i) => {
+    if (id === null) return [];
+    const before = first.get(id);
+    first.set(id, before ?? i);
+    return before === undefined
+      ? []
+      : [
+          {
+            path: ['sites', i, 'id'],
+            problem: `${quoted(id)} is the id of ${fieldOf(['sites', before])} already: give every site its own`,
+          },
+        ];
+  });
+}
+
+function homeNowhere(root: unknown): CrossFault[] {
+  const home = wordAt(root, ['home']);
+  const ids = siteIds(root).filter((id) => id !== null);
+  if (home === null || ids.includes(home)) return [];
+  return [
+    {
+      path: ['home'],
+      problem: `${quoted(home)} is the id of no site.${ids.length === 0 ? ' The plan has no sites' : oneOf(home, ids)}`,
+    },
+  ];
+}
+
+function impossiblePairs(root: unknown): CrossFault[] {
+  return listAt(root, ['residuals', 'pairs']).flatMap((pair, i) => {
+    if (!Array.isArray(pair)) return [];
+    const path = ['residuals', 'pairs', i];
+    const [a, b] = pair as unknown[];
+    if (a === b && typeof a === 'string') {
+      return [{ path, problem: `${quoted(a)} twice: a pair is two different bodies` }];
+    }
+    return pair.includes('sun') && pair.includes('earth')
+      ? [{ path, problem: 'sun and earth mirror one motion: pair one of them with another planet' }]
+      : [];
+  });
+}
+
+const siteIds = (root: unknown): (string | null)[] =>
+  listAt(root, ['sites']).map((_, i) => wordAt(root, ['sites', i, 'id']));
+
+function wordAt(root: unknown, path: Path): string | null {
+  const value = valueAt(root, path);
+  return typeof value === 'string' ? value : null;
+}
+
+function listAt(root: unknown, path: Path): unknown[] {
+  const value = valueAt(root, path);
+  return Array.isArray(value) ? value : [];
+}

@@ -1,0 +1,25 @@
+import { closeSync, fsyncSync, openSync, renameSync, rmSync, writeSync } from 'node:fs';
+import { basename, dirname, join } from 'node:path';
+
+/**
+ * Writes a file whole or not at all: into a neighbour of the same folder first, which then takes the name in one step.
+ * Whoever reads, or a process that is killed in the middle, finds the old file or the new one, never a part.
+ */
+export function writeWhole(path: string, bytes: Uint8Array): void {
+  const neighbour = join(dirname(path), `.${basename(path)}.${process.pid}.part`);
+  // What a killed process with our number left behind; and `wx`: never through a link that somebody put there.
+  rmSync(neighbour, { force: true });
+  const file = openSync(neighbour, 'wx', 0o644);
+  try {
+    try {
+      for (let done = 0; done < bytes.length;) done += writeSync(file, bytes, done);
+      fsyncSync(file);
+    } finally {
+      closeSync(file);
+    }
+    renameSync(neighbour, path);
+  } catch (fault) {
+    rmSync(neighbour, { force: true });
+    throw fault;
+  }
+}
