@@ -11,9 +11,7 @@ import type { Reading } from './read-instant.js';
 function readName<T extends string>(word: string, what: string, names: readonly T[]): Reading<T> {
   const name = names.find((candidate) => candidate === word.toLowerCase());
   if (name !== undefined) return { value: name };
-  return {
-    problem: `${quoted(word)} is not a ${what}.${didYouMean(word, names)} There are: ${names.join(', ')}`,
-  };
+  return { problem: `${quoted(word)} is not a ${what}.${oneOf(word, names)}` };
 }
 
 /** The Sun or a planet. */
