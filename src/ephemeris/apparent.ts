@@ -16,11 +16,11 @@ const LIGHT_TIME_TOLERANCE_DAYS = 2e-9;
 /** Where the Earth's centre is, and how fast it moves, at one instant: what all places of that instant share. */
 export interface Observer {
   readonly tt: TtDays;
-  /** From the barycentre, au. */
-  readonly earth: Vector;
   /** From the Sun's centre, au. */
   readonly earthFromSun: Vector;
-  /** About the barycentre, in units of the speed of light. */
+  /** Of the Sun about the barycentre, au a day. */
+  readonly sunVelocity: Vector;
+  /** Of the Earth about the barycentre, in units of the speed of light. */
   readonly velocity: Vector;
 }
 
@@ -42,8 +42,8 @@ export class ApparentPlaces {
     const sun = this.geometry.sunMotion(tt);
     this.lastObserver = {
       tt,
-      earth: add(earth.position, sun.position),
       earthFromSun: earth.position,
+      sunVelocity: sun.velocity,
       velocity: scale(add(earth.velocity, sun.velocity), 1 / LIGHT_AU_PER_DAY),
     };
     return this.lastObserver;
@@ -78,11 +78,20 @@ export class ApparentPlaces {
     return this.aberrated(this.retarded(body, observer), observer);
   }
 
-  private retarded(body: Body, { tt, earth }: Observer): Vector {
-    let place = subtract(this.barycentric(body, tt), earth);
-    let lightTimeDays = length(place) / LIGHT_AU_PER_DAY;
+  /**
+   * From the Earth now to the body when the light left it. Both are taken from the barycentre by letting the Sun move
+   * evenly in the meantime, which is true to 30 m in the light-time of Neptune.
+   */
+  private retarded(body: Body, { tt, earthFromSun, sunVelocity }: Observer): Vector {
+    let lightTimeDays = 0;
+    let place = earthFromSun;
     for (let step = 0; step < MAX_LIGHT_TIME_STEPS; step++) {
-      place = subtract(this.barycentric(body, ttDays(tt - lightTimeDays)), earth);
+      const fromSun = body === 'sun' ? ORIGIN : this.geometry.heliocentric(body, ttDays(tt - lightTimeDays));
+      place = {
+        x: fromSun.x - earthFromSun.x - sunVelocity.x * lightTimeDays,
+        y: fromSun.y - earthFromSun.y - sunVelocity.y * lightTimeDays,
+        z: fromSun.z - earthFromSun.z - sunVelocity.z * lightTimeDays,
+      };
       const next = length(place) / LIGHT_AU_PER_DAY;
       const settled = Math.abs(next - lightTimeDays) < LIGHT_TIME_TOLERANCE_DAYS;
       lightTimeDays = next;
@@ -96,12 +105,9 @@ export class ApparentPlaces {
     const distanceAu = length(place);
     return scale(aberrate(scale(place, 1 / distanceAu), velocity, length(earthFromSun)), distanceAu);
   }
-
-  private barycentric(body: Body, tt: TtDays): Vector {
-    const sun = this.geometry.sunFromBarycentre(tt);
-    return body === 'sun' ? sun : add(this.geometry.heliocentric(body, tt), sun);
-  }
 }
+
+const ORIGIN: Vector = { x: 0, y: 0, z: 0 };
 
 /** Bends a geocentric place (au) past the Sun; nothing is bent more than at 3.4′ from its centre. */
 function deflectBySun(place: Vector, earthFromSun: Vector): Vector {

@@ -1,15 +1,10 @@
-import { Rotation_EQJ_ECT, Rotation_EQJ_EQD } from 'astronomy-engine';
+import { Rotation_EQJ_EQD, e_tilt } from 'astronomy-engine';
 import type { RotationMatrix } from 'astronomy-engine';
+import { RADIANS_PER_DEGREE, add, scale } from '../math/index.js';
 import type { Rotation } from '../math/index.js';
 import type { TtDays } from '../time/index.js';
 import { libraryTime } from './library.js';
 import type { Frame } from './paths.js';
-
-const identity: Rotation = [
-  { x: 1, y: 0, z: 0 },
-  { x: 0, y: 1, z: 0 },
-  { x: 0, y: 0, z: 1 },
-];
 
 /**
  * The rotation from the axes of J2000.0 to a frame at an instant.
@@ -18,13 +13,18 @@ const identity: Rotation = [
  */
 export function rotationTo(frame: Frame, tt: TtDays): Rotation {
   switch (frame) {
-    case 'j2000':
-      return identity;
     case 'equator-of-date':
       return rowsOf(Rotation_EQJ_EQD(libraryTime(tt)));
     case 'ecliptic-of-date':
-      return rowsOf(Rotation_EQJ_ECT(libraryTime(tt)));
+      return eclipticFromEquator(rotationTo('equator-of-date', tt), tt);
   }
+}
+
+/** Tilts the axes of the true equator of date, given by their rotation, by the true obliquity. */
+export function eclipticFromEquator([x, y, z]: Rotation, tt: TtDays): Rotation {
+  const obliquity = e_tilt(libraryTime(tt)).tobl * RADIANS_PER_DEGREE;
+  const [cosine, sine] = [Math.cos(obliquity), Math.sin(obliquity)];
+  return [x, add(scale(y, cosine), scale(z, sine)), add(scale(z, cosine), scale(y, -sine))];
 }
 
 /** The library keeps `rot[i][j]` so that target component j is the sum over source components i. */

@@ -4,25 +4,25 @@ import type { Vector } from '../math/index.js';
 import type { TtDays } from '../time/index.js';
 import type { Motion } from './paths.js';
 import type { EphemerisSource } from './source.js';
-import { VectorTrack } from './vector-track.js';
-import type { BlockShape } from './vector-track.js';
+import { trackOf } from './vector-track.js';
+import type { BlockShape, VectorTrack } from './vector-track.js';
 
 /**
- * Blocks short enough that sixteen nodes give geocentric directions to 0.00002″ (Pluto, whose library positions are
+ * Blocks short enough that sixteen nodes give geocentric directions to 0.00004″ (Pluto, whose library positions are
  * not quite smooth: 0.002″). The Earth's are shorter than its year asks for, because the Moon swings it every month.
  */
 const shapes: Readonly<Record<Planet, BlockShape>> = {
-  mercury: { blockDays: 16, nodes: 16 },
-  venus: { blockDays: 64, nodes: 16 },
+  mercury: { blockDays: 22, nodes: 16 },
+  venus: { blockDays: 96, nodes: 16 },
   earth: { blockDays: 32, nodes: 16 },
-  mars: { blockDays: 128, nodes: 16 },
-  jupiter: { blockDays: 512, nodes: 16 },
-  saturn: { blockDays: 512, nodes: 16 },
-  uranus: { blockDays: 512, nodes: 16 },
-  neptune: { blockDays: 512, nodes: 16 },
+  mars: { blockDays: 192, nodes: 16 },
+  jupiter: { blockDays: 1024, nodes: 16 },
+  saturn: { blockDays: 1024, nodes: 16 },
+  uranus: { blockDays: 1024, nodes: 16 },
+  neptune: { blockDays: 1024, nodes: 16 },
   pluto: { blockDays: 512, nodes: 16 },
 };
-const sunShape: BlockShape = { blockDays: 512, nodes: 16 };
+const sunShape: BlockShape = { blockDays: 1024, nodes: 16 };
 
 /**
  * An ephemeris source seen through tracks: the same geometric positions, with their derivatives, at a small part of
@@ -35,12 +35,9 @@ export interface Geometry extends EphemerisSource {
 
 export function geometryOf(source: EphemerisSource): Geometry {
   const orbits = new Map<Planet, VectorTrack>(
-    planets.map((planet) => [
-      planet,
-      new VectorTrack(shapes[planet], (tt) => source.heliocentric(planet, tt)),
-    ]),
+    planets.map((planet) => [planet, trackOf(shapes[planet], (tt) => source.heliocentric(planet, tt))]),
   );
-  const sun = new VectorTrack(sunShape, (tt) => source.sunFromBarycentre(tt));
+  const sun = trackOf(sunShape, (tt) => source.sunFromBarycentre(tt));
   return {
     name: source.name,
     description: source.description,

@@ -1,4 +1,4 @@
-import { rotate, subtract } from '../math/index.js';
+import { dot, rotate, subtract } from '../math/index.js';
 import type { Jet, Rotation } from '../math/index.js';
 import type { Motion } from './paths.js';
 
@@ -31,9 +31,10 @@ export function longitudeOf(x: Jet, y: Jet, perDay: number): Jet {
   };
 }
 
-export const longitudeOfMotion = ({ position, velocity, acceleration }: Motion): Jet =>
+/** The longitude of a motion on turned axes that are taken as fixed at the instant. */
+export const longitudeOfMotion = ({ position, velocity, acceleration }: Motion, [x, y]: Rotation): Jet =>
   longitudeOf(
-    { value: position.x, rate: velocity.x, acceleration: acceleration.x },
-    { value: position.y, rate: velocity.y, acceleration: acceleration.y },
+    { value: dot(x, position), rate: dot(x, velocity), acceleration: dot(x, acceleration) },
+    { value: dot(y, position), rate: dot(y, velocity), acceleration: dot(y, acceleration) },
     1,
   );

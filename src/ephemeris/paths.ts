@@ -2,8 +2,8 @@ import type { Body } from '../bodies/index.js';
 import type { Jet, Vector } from '../math/index.js';
 import type { TtDays } from '../time/index.js';
 
-/** Axes in which a direction is given; "of date" is the true equator and equinox (nutation included). */
-export type Frame = 'j2000' | 'equator-of-date' | 'ecliptic-of-date';
+/** Axes in which a direction is given: the true equator, or ecliptic, and equinox of date (nutation included). */
+export type Frame = 'equator-of-date' | 'ecliptic-of-date';
 
 /** A vector with its first and second time derivatives, per day and per day². */
 export interface Motion {

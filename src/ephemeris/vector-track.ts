@@ -6,35 +6,29 @@ import type { TtDays } from '../time/index.js';
 import { BlockCache } from './block-cache.js';
 import type { Motion } from './paths.js';
 
-/** About four centuries of the shortest blocks: 2 MB a track. */
-const KEPT_BLOCKS = 4096;
-
 export interface BlockShape {
   readonly blockDays: number;
   readonly nodes: number;
 }
+
+/** The Chebyshev coefficients of block `index`: those of x, then of y, then of z. */
+export type Blocks = (index: number) => Float64Array;
+
+/** About four centuries of the shortest blocks: 2 MB a track. */
+export const KEPT_BLOCKS = 4096;
 
 /**
  * A vector function of time, held as Chebyshev blocks that are filled only where someone looks. Block k covers
  * [k, k+1)·blockDays of TT since J2000.0, so that every track with blocks of one length shares its nodes.
  */
 export class VectorTrack {
-  private readonly blocks: BlockCache<Float64Array>;
   private readonly jets: readonly [Jet, Jet, Jet] = [emptyJet(), emptyJet(), emptyJet()];
-  private readonly samples: readonly [Float64Array, Float64Array, Float64Array];
   private readonly perDay: number;
 
   constructor(
     private readonly shape: BlockShape,
-    /** The vector at node `node` of block `block`, the instant of which is `tt`. */
-    private readonly sample: (tt: TtDays, node: number, block: number) => Vector,
+    private readonly blockAt: Blocks,
   ) {
-    this.blocks = new BlockCache((index) => this.fill(index), KEPT_BLOCKS);
-    this.samples = [
-      new Float64Array(shape.nodes),
-      new Float64Array(shape.nodes),
-      new Float64Array(shape.nodes),
-    ];
     this.perDay = 2 / shape.blockDays;
   }
 
@@ -42,7 +36,7 @@ export class VectorTrack {
     const { blockDays, nodes } = this.shape;
     const index = Math.floor(tt / blockDays);
     const x = (tt - index * blockDays) * this.perDay - 1;
-    const block = this.blocks.get(index);
+    const block = this.blockAt(index);
     return {
       x: chebyshevValue(block, 0, nodes, x),
       y: chebyshevValue(block, nodes, nodes, x),
@@ -55,7 +49,7 @@ export class VectorTrack {
     const { perDay } = this;
     const index = Math.floor(tt / blockDays);
     const x = (tt - index * blockDays) * perDay - 1;
-    const block = this.blocks.get(index);
+    const block = this.blockAt(index);
     const [jx, jy, jz] = this.jets;
     evaluateChebyshev(block, 0, nodes, x, jx);
     evaluateChebyshev(block, nodes, nodes, x, jy);
@@ -77,26 +71,51 @@ export class VectorTrack {
     const { blockDays, nodes } = this.shape;
     const index = Math.floor(tt / blockDays);
     const x = (tt - index * blockDays) * this.perDay - 1;
-    const block = this.blocks.get(index);
+    const block = this.blockAt(index);
     const [jx, jy] = this.jets;
     evaluateChebyshev(block, 0, nodes, x, jx);
     evaluateChebyshev(block, nodes, nodes, x, jy);
     return longitudeOf(jx, jy, this.perDay);
   }
+}
 
-  private fill(index: number): Float64Array {
-    const { nodes } = this.shape;
-    const [xs, ys, zs] = this.samples;
-    for (let k = 0; k < nodes; k++) {
-      const { x, y, z } = this.sample(nodeTime(this.shape, index, k), k, index);
-      xs[k] = x;
-      ys[k] = y;
-      zs[k] = z;
-    }
-    const block = new Float64Array(3 * nodes);
-    fitChebyshev(xs, block, 0);
-    fitChebyshev(ys, block, nodes);
-    fitChebyshev(zs, block, 2 * nodes);
+/** A track whose blocks are fitted to the vectors at their nodes, and kept. */
+export function fittedTrack(shape: BlockShape, sample: (block: number, node: number) => Vector): VectorTrack {
+  const fit = new BlockFit(shape.nodes);
+  const blocks = new BlockCache((block) => {
+    for (let node = 0; node < shape.nodes; node++) fit.put(node, sample(block, node));
+    return fit.coefficients();
+  }, KEPT_BLOCKS);
+  return new VectorTrack(shape, (index) => blocks.get(index));
+}
+
+/** The same of a function of time. */
+export const trackOf = (shape: BlockShape, at: (tt: TtDays) => Vector): VectorTrack =>
+  fittedTrack(shape, (block, node) => at(nodeTime(shape, block, node)));
+
+/** Takes the vectors at the nodes of a block and gives its coefficients; one serves block after block. */
+export class BlockFit {
+  private readonly xs: Float64Array;
+  private readonly ys: Float64Array;
+  private readonly zs: Float64Array;
+
+  constructor(private readonly nodes: number) {
+    this.xs = new Float64Array(nodes);
+    this.ys = new Float64Array(nodes);
+    this.zs = new Float64Array(nodes);
+  }
+
+  put(node: number, { x, y, z }: Vector): void {
+    this.xs[node] = x;
+    this.ys[node] = y;
+    this.zs[node] = z;
+  }
+
+  coefficients(): Float64Array {
+    const block = new Float64Array(3 * this.nodes);
+    fitChebyshev(this.xs, block, 0);
+    fitChebyshev(this.ys, block, this.nodes);
+    fitChebyshev(this.zs, block, 2 * this.nodes);
     return block;
   }
 }

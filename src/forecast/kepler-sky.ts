@@ -5,7 +5,7 @@ import { longitudeOfMotion, rotateMotion, subtractMotions } from '../ephemeris/i
 import type { Frame, Motion } from '../ephemeris/index.js';
 import { RADIANS_PER_ARCSEC } from '../math/index.js';
 import type { Rotation } from '../math/index.js';
-import { centuriesOf } from '../time/index.js';
+import { centuriesOf, ttDays } from '../time/index.js';
 import type { TtDays } from '../time/index.js';
 import type { SkyModel } from './signal.js';
 
@@ -24,18 +24,16 @@ export function keplerSky(table: ElementTable | 'by-date'): SkyModel {
   // Two bodies are asked for at one instant, one after the other, on the same axes and from the same Earth.
   const earth = rememberLast((tt) => orbit('earth', tt));
   const axes = {
-    j2000: rememberLast((tt) => fromEclipticJ2000('j2000', tt)),
     'equator-of-date': rememberLast((tt) => fromEclipticJ2000('equator-of-date', tt)),
     'ecliptic-of-date': rememberLast((tt) => fromEclipticJ2000('ecliptic-of-date', tt)),
   };
-  const geocentric = (body: Body, frame: Frame, tt: TtDays): Motion =>
-    rotateMotion(axes[frame](tt), subtractMotions(body === 'sun' ? still : orbit(body, tt), earth(tt)));
+  const relative = (body: Body, tt: TtDays): Motion =>
+    subtractMotions(body === 'sun' ? still : orbit(body, tt), earth(tt));
   return {
-    geocentric,
-    longitude: (body, frame, tt) => longitudeOfMotion(geocentric(body, frame, tt)),
-    heliocentric: (planet, tt) => rotateMotion(axes.j2000(tt), orbit(planet, tt)),
-    heliocentricLongitude: (planet, tt) =>
-      longitudeOfMotion(rotateMotion(axes['ecliptic-of-date'](tt), orbit(planet, tt))),
+    geocentric: (body, frame, tt) => rotateMotion(axes[frame](tt), relative(body, tt)),
+    longitude: (body, frame, tt) => longitudeOfMotion(relative(body, tt), axes[frame](tt)),
+    heliocentric: (planet, tt) => rotateMotion(equatorOfJ2000, orbit(planet, tt)),
+    heliocentricLongitude: (planet, tt) => longitudeOfMotion(orbit(planet, tt), axes['ecliptic-of-date'](tt)),
   };
 }
 
@@ -55,7 +53,7 @@ function rememberLast<Value>(make: (tt: TtDays) => Value): (tt: TtDays) => Value
 
 /** The ecliptic is taken as fixed (it tilts by 0.8′ in a century), the equinox as moving evenly along it. */
 function fromEclipticJ2000(frame: Frame, tt: TtDays): Rotation {
-  const centuries = frame === 'j2000' ? 0 : centuriesOf(tt);
+  const centuries = centuriesOf(tt);
   const precession = PRECESSION_ARCSEC_PER_CENTURY * centuries * RADIANS_PER_ARCSEC;
   const obliquity =
     frame === 'ecliptic-of-date'
@@ -69,3 +67,5 @@ function fromEclipticJ2000(frame: Frame, tt: TtDays): Rotation {
     { x: sp * so, y: cp * so, z: co },
   ];
 }
+
+const equatorOfJ2000 = fromEclipticJ2000('equator-of-date', ttDays(0));

@@ -3,8 +3,9 @@ import type { TtDays } from '../time/index.js';
 import type { Signal } from './signal.js';
 
 const MAX_STEPS = 12;
-/** A step this small leaves an error far below it, because each step squares the one before. */
-const SETTLED_DAYS = 1e-6;
+/** A secant's step this small leaves an error of a millisecond, a Newton step ten times as large one of a microsecond. */
+const SECANT_SETTLED_DAYS = 1e-5;
+const NEWTON_SETTLED_DAYS = 1e-4;
 
 /**
  * The zero of a function near an estimate, by secants that start from a known rate.
@@ -27,7 +28,7 @@ export function refineZero(
     }
     const next = ttDays(tt - here / slope);
     if (!(Math.abs(next - estimate) <= reachDays)) return null;
-    if (Math.abs(next - tt) < SETTLED_DAYS) return next;
+    if (Math.abs(next - tt) < SECANT_SETTLED_DAYS) return next;
     before = { tt, value: here };
     tt = next;
   }
@@ -58,14 +59,16 @@ export function nearest(
     const shift = Math.max(-largestStep, Math.min(largestStep, wanted));
     tt = ttDays(tt + shift);
     if (!(Math.abs(tt - estimate) <= reachDays)) return null;
-    if (Math.abs(shift) < SETTLED_DAYS) return tt;
+    if (Math.abs(shift) < NEWTON_SETTLED_DAYS) return tt;
   }
   return null;
 }
 
 /** Between the five points of a derivative: long against rounding, short against the curve's own change. */
 const DERIVATIVE_STEP_DAYS = 0.05;
-const TURN_PASSES = 2;
+/** One pass is enough but where a body passes behind the Sun, whose deflection the estimate has not heard of. */
+const TURN_PASSES = 3;
+const TURN_SETTLED_DAYS = 1e-3;
 
 /**
  * The turning point of a smooth function near one that is already good to minutes, by Newton's method on five-point
@@ -80,7 +83,9 @@ export function refineTurn(near: TtDays, value: (tt: TtDays) => number): TtDays 
     const [b2, b1, here, a1, a2] = [at(-2), at(-1), at(0), at(1), at(2)];
     const rate = (8 * (a1 - b1) - (a2 - b2)) / (12 * h);
     const acceleration = (16 * (a1 + b1) - (a2 + b2) - 30 * here) / (12 * h * h);
-    tt = ttDays(tt - rate / acceleration);
+    const shift = -rate / acceleration;
+    tt = ttDays(tt + shift);
+    if (Math.abs(shift) < TURN_SETTLED_DAYS) break;
   }
   return tt;
 }

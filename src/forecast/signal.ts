@@ -35,10 +35,39 @@ export const distanceJet = ({ position, velocity, acceleration }: Motion): Jet =
 });
 
 /**
- * Half the squared chord between two directions on the unit sphere, `1 − cos(separation)`: it turns where the
+ * `1 − cos(separation)` of two bodies, which is half the squared chord between their directions: it turns where the
  * separation turns, and has no cusp where the separation vanishes.
  */
-export const separationJet = (a: Motion, b: Motion): Jet => distanceJet(relativeDirection(a, b));
+export function separationJet(a: Motion, b: Motion): Jet {
+  const product =
+    dot(a.acceleration, b.position) + 2 * dot(a.velocity, b.velocity) + dot(a.position, b.acceleration);
+  const productRate = dot(a.velocity, b.position) + dot(a.position, b.velocity);
+  const [la, lb] = [logarithmicLength(a), logarithmicLength(b)];
+  const lengths = Math.sqrt(la.value * lb.value);
+  const growth = la.rate + lb.rate;
+  const cosine = dot(a.position, b.position) / lengths;
+  const cosineRate = productRate / lengths - cosine * growth;
+  return {
+    value: 1 - cosine,
+    rate: -cosineRate,
+    acceleration: -(
+      (product - productRate * growth) / lengths -
+      cosineRate * growth -
+      cosine * (la.acceleration + lb.acceleration)
+    ),
+  };
+}
+
+/** The squared length of a motion, and the first two derivatives of the logarithm of the length. */
+function logarithmicLength({ position, velocity, acceleration }: Motion): Jet {
+  const square = dot(position, position);
+  const rate = dot(position, velocity) / square;
+  return {
+    value: square,
+    rate,
+    acceleration: (dot(velocity, velocity) + dot(position, acceleration)) / square - 2 * rate * rate,
+  };
+}
 
 /** The chord from direction b to direction a on the unit sphere, with its derivatives. */
 export const relativeDirection = (a: Motion, b: Motion): Motion =>

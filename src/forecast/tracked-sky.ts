@@ -1,4 +1,4 @@
-import { ApparentPlaces, Tracks, geometryOf, longitudeOfMotion, rotateMotion } from '../ephemeris/index.js';
+import { ApparentPlaces, Tracks, geometryOf, longitudeOfMotion } from '../ephemeris/index.js';
 import type { EphemerisSource, Frame, Geometry } from '../ephemeris/index.js';
 import type { Body } from '../bodies/index.js';
 import { rotate } from '../math/index.js';
@@ -30,8 +30,6 @@ export function trackedSky(source: EphemerisSource): TrackedSky {
     longitude: (body, frame, tt) => tracks.longitude(body, frame, tt),
     heliocentric: (planet, tt) => geometry.heliocentricMotion(planet, tt),
     heliocentricLongitude: (planet, tt) =>
-      longitudeOfMotion(
-        rotateMotion(tracks.rotation('ecliptic-of-date', tt), geometry.heliocentricMotion(planet, tt)),
-      ),
+      longitudeOfMotion(geometry.heliocentricMotion(planet, tt), tracks.rotation('ecliptic-of-date', tt)),
   };
 }
