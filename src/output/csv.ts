@@ -1,8 +1,8 @@
 /** A cell: text is quoted and disarmed, numbers are written as they are, null is empty. */
 export type Cell = string | number | null;
 
-/** What a spreadsheet would take for a formula. */
-const FORMULA_START = /^[=+\-@\t\r]/;
+/** What a spreadsheet would take for a formula, also in the wide forms of East Asian keyboards. */
+const FORMULA_START = /^[=+\-@\t\r\n＝＋－＠]/;
 
 function cellText(cell: Cell): string {
   if (cell === null) return '';

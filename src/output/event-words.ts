@@ -92,6 +92,6 @@ export function circumstancesLine(event: ForecastEvent): string {
   }
 }
 
-/** `cycle +13`, and `1 of 3` where the cycle has several. */
+/** `1 of 3` where the cycle has several; null where it has one. */
 export const seriesWords = ({ series }: ForecastEvent): string | null =>
   series === null ? null : `${series.index} of ${series.of}`;

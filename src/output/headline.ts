@@ -1,9 +1,12 @@
 import { titleOf } from '../bodies/index.js';
 import type { ForecastEvent } from '../forecast/index.js';
-import { localDateTime } from '../time/index.js';
-import { leastElongationDeg } from './event-words.js';
+import { localDateTime, utcFromTt, utcMillis } from '../time/index.js';
+import type { UtcMillis } from '../time/index.js';
+import { bodiesWords, leastElongationDeg } from './event-words.js';
+import { happeningOf } from './happening.js';
+import { aidWords, lookWords, nightWords } from './look-words.js';
 import { angleWords, fixed } from './numbers.js';
-import { tellInstant } from './uncertainty-words.js';
+import { grainOf, tellInstant } from './uncertainty-words.js';
 
 /** Nearer to the Sun than this nothing is a sight. */
 export const OBSERVABLE_ELONGATION_DEG = 15;
@@ -19,54 +22,66 @@ export function isObservable(event: ForecastEvent): boolean {
   return elongationDeg !== null && elongationDeg >= OBSERVABLE_ELONGATION_DEG;
 }
 
-/** What a newspaper could print of an event: first what to do, then why. */
-export function headlineOf(event: ForecastEvent): string {
-  const { circumstances } = event;
-  const [first, second] = event.bodies.map(titleOf);
+/**
+ * What a newspaper could print of an event: what happens and when, then what to do about it at the first site.
+ * @param zone whose dates are told; the first site's by default, else UTC
+ */
+export function headlineOf(event: ForecastEvent, zone = event.local[0]?.zone ?? 'UTC'): string {
+  const observable = isObservable(event);
+  const look = event.local[0]?.bestLook ?? null;
+  const sentences =
+    observable && look?.separationDeg != null
+      ? [
+          `${bodiesWords(event)} stand ${angleWords(look.separationDeg)} apart ${nightWords(look, zone)}; ${lookWords(look, zone)}.`,
+        ]
+      : [observable ? seasonSentence(event, zone) : plainSentence(event, zone), adviceOf(event, observable)];
+  return [...sentences, observable ? aidWords(event) : null]
+    .filter((sentence) => sentence !== null)
+    .join(' ');
+}
+
+const plainSentence = (event: ForecastEvent, zone: string): string =>
+  `${capitalised(dateWords(event, zone))} ${happeningOf(event)}.`;
+
+const capitalised = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
+function dateWords({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
+  const around = grainOf(uncertaintySeconds.utc) === 'day' ? 'around' : 'on';
+  return `${around} ${tellInstant(utc, uncertaintySeconds.utc, zone).longDate}`;
+}
+
+/** Sights that last are told as the time for which they do. */
+function seasonSentence(event: ForecastEvent, zone: string): string {
+  const { circumstances, interval, utc } = event;
+  if (circumstances.about !== 'one-body') return plainSentence(event, zone);
+  if (event.kind === 'opposition') {
+    const near = circumstances.closeness === undefined ? '' : `, ${circumstances.closeness.phrase}`;
+    const season = spanWords(
+      utcMillis(utc - SEASON_WEEKS * WEEK_MILLIS),
+      utcMillis(utc + SEASON_WEEKS * WEEK_MILLIS),
+      zone,
+    );
+    return `${titleOf(circumstances.body)} is at its best from about ${season}: it stands opposite the Sun ${dateWords(event, zone)}, ${fixed(circumstances.diameterArcsec, 1)}″ across${near}.`;
+  }
+  if (event.kind === 'greatest-brilliancy' && interval !== null) {
+    return `${happeningOf(event)}, from ${spanWords(utcFromTt(interval.from), utcFromTt(interval.to), zone)}.`;
+  }
+  return plainSentence(event, zone);
+}
+
+/** `22 January to 19 March 2027`; the first year too where there are two. */
+function spanWords(from: UtcMillis, to: UtcMillis, zone: string): string {
+  const [first, last] = [localDateTime(from, zone), localDateTime(to, zone)];
+  const firstDay = first.toFormat(first.year === last.year ? 'd LLLL' : 'd LLLL yyyy');
+  return `${firstDay} to ${last.toFormat('d LLLL yyyy')}`;
+}
+
+/** The first site's verdict; without a site, why there is nothing to see. */
+function adviceOf(event: ForecastEvent, observable: boolean): string | null {
   const [home] = event.local;
-  const zone = home?.zone ?? 'UTC';
-  const on = tellInstant(event.utc, event.uncertaintySeconds.utc, zone).longDate;
-  const look = home === undefined ? '' : ` ${home.verdict}`;
-  if (circumstances.about === 'heliocentric') {
-    const sides = event.kind === 'heliocentric-conjunction' ? 'on one side of' : 'on opposite sides of';
-    return `${first!} and ${second!} stand ${sides} the Sun on ${on}.`;
-  }
-  if (!isObservable(event)) {
-    const elongationDeg = leastElongationDeg(event);
-    const why =
-      home !== undefined ? home.verdict : `Not observable, ${fixed(elongationDeg ?? 0, 0)}° from the Sun.`;
-    return `${first!}${second === undefined ? '' : ` and ${second}`}, ${on}. ${why}`;
-  }
-  if (circumstances.about === 'two-bodies') {
-    const then = home?.bestLook?.separationDeg ?? circumstances.separationDeg;
-    const when =
-      home?.bestLook == null
-        ? `on ${on}`
-        : `on ${localDateTime(home.bestLook.utc, zone).toFormat('cccc d LLLL yyyy')}`;
-    return `${first!} and ${second!} stand ${angleWords(then)} apart ${when}.${look}`;
-  }
-  if (circumstances.about === 'heliocentric')
-    return `${first!} and ${second!} line up with the Sun on ${on}.`;
-  switch (event.kind) {
-    case 'opposition': {
-      const day = (weeks: number): string =>
-        localDateTime(event.utc, zone)
-          .plus({ milliseconds: weeks * WEEK_MILLIS })
-          .toFormat('d LLLL');
-      const near = circumstances.closeness === undefined ? '' : `, ${circumstances.closeness.phrase}`;
-      return `${first!} is up all night from about ${day(-SEASON_WEEKS)} to ${day(SEASON_WEEKS)}: it stands opposite the Sun on ${on}, ${fixed(circumstances.diameterArcsec, 1)}″ across${near}.${look}`;
-    }
-    case 'greatest-elongation-east':
-      return `${first!} is at its best in the evening sky around ${on}, ${fixed(circumstances.elongationDeg, 0)}° from the Sun.${look}`;
-    case 'greatest-elongation-west':
-      return `${first!} is at its best in the morning sky around ${on}, ${fixed(circumstances.elongationDeg, 0)}° from the Sun.${look}`;
-    case 'greatest-brilliancy': {
-      const side = circumstances.elongationSide === 'east' ? 'evening' : 'morning';
-      return `${first!} is at its brightest in the ${side} sky for some days around ${on}.${look}`;
-    }
-    case 'closest-approach':
-      return `${first!} is closest to the Earth on ${on}, ${fixed(circumstances.distanceKm / 1e6, 0)} million km away.${look}`;
-    default:
-      return `${first!}: ${event.kind.replaceAll('-', ' ')} on ${on}.${look}`;
-  }
+  if (home !== undefined) return home.verdict;
+  const elongationDeg = leastElongationDeg(event);
+  return observable || elongationDeg === null
+    ? null
+    : `Not observable, ${fixed(elongationDeg, 0)}° from the Sun.`;
 }

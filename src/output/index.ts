@@ -1,4 +1,4 @@
-export { CAUTION_ELONGATION_DEG, cautions, needsSunCaution } from './cautions.js';
+export { CAUTION_ELONGATION_DEG, cautions, cautionsOf, needsSunCaution } from './cautions.js';
 export { csv } from './csv.js';
 export type { Cell } from './csv.js';
 export {

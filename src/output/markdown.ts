@@ -1,4 +1,6 @@
 import type { Forecast, ForecastEvent } from '../forecast/index.js';
+import type { Site } from '../sky/index.js';
+import { zoneAbbreviation } from '../time/index.js';
 import { tellInstant, uncertaintyShort } from './uncertainty-words.js';
 import { bodiesWords, circumstancesLine, kindTitles, seriesWords } from './event-words.js';
 
@@ -17,24 +19,24 @@ export function markdownTable(header: readonly string[], rows: readonly (readonl
   return line(header) + `|${' --- |'.repeat(header.length)}\n` + rows.map(line).join('');
 }
 
-/** Every event of a forecast as a table; times on the first site's clocks, or in UTC. */
-export function eventsMarkdown({ events }: Pick<Forecast, 'events'>): string {
-  const atSite = events.some(({ local }) => local.length > 0);
+/** Every event of a forecast as a table, on the first site's clocks, or in UTC where there is no site. */
+export function eventsMarkdown({ events }: Pick<Forecast, 'events'>, sites: readonly Site[]): string {
+  const [home] = sites;
   return markdownTable(
-    ['when', 'how sure', 'event', 'what is true of it', ...(atSite ? ['from here'] : [])],
+    ['when', 'how sure', 'event', 'what is true of it', ...(home === undefined ? [] : [`from ${home.name}`])],
     events.map((event) => [
-      whenWords(event),
+      whenWords(event, home?.zone ?? 'UTC'),
       uncertaintyShort(event.uncertaintySeconds.utc),
       [bodiesWords(event), kindTitles[event.kind], seriesWords(event)]
         .filter((word) => word !== null)
         .join(', '),
       circumstancesLine(event),
-      ...(atSite ? [event.local[0]?.verdict ?? 'Not in the Earth’s sky.'] : []),
+      ...(home === undefined ? [] : [event.local[0]?.verdict ?? 'Not in the Earth’s sky.']),
     ]),
   );
 }
 
-function whenWords({ utc, uncertaintySeconds, local }: ForecastEvent): string {
-  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, local[0]?.zone ?? 'UTC');
-  return [isoDate, weekday, time].join(' ').trim();
+function whenWords({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
+  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
+  return [isoDate, weekday, ...(time === '' ? [] : [time, zoneAbbreviation(utc, zone)])].join(' ');
 }

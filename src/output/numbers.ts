@@ -10,34 +10,34 @@ export function signed(value: number, digits: number): string {
   return text.startsWith('−') ? text : `+${text}`;
 }
 
-/** A whole number of the last unit, split by sixties, so that no part ever reads 60. */
-function sexagesimal(units: number, perUnit: readonly number[]): number[] {
-  const parts: number[] = [];
-  let rest = Math.round(units);
-  for (const size of [...perUnit].reverse()) {
-    parts.unshift(rest % size);
-    rest = Math.floor(rest / size);
-  }
-  return [rest, ...parts];
+/** A whole number of sixtieths of sixtieths, so that no part ever reads 60. */
+function sexagesimal(seconds: number): readonly [whole: number, minutes: number, seconds: number] {
+  return [Math.floor(seconds / 3600), Math.floor(seconds / 60) % 60, seconds % 60];
 }
 
 const two = (value: number): string => String(value).padStart(2, '0');
 
-/** `10h 17m 50s`, of a right ascension or a sidereal time in hours. */
+/** `10h 17m 50s`, of a right ascension or a sidereal time in hours, 0 … 24 or any turns beyond. */
 export function hoursWords(hours: number): string {
-  const [h, m, s] = sexagesimal(hours * 3600, [60, 60]);
-  return `${two(h! % 24)}h ${two(m!)}m ${two(s!)}s`;
+  const daySeconds = 86_400;
+  const [h, m, s] = sexagesimal(((Math.round(hours * 3600) % daySeconds) + daySeconds) % daySeconds);
+  return `${two(h)}h ${two(m)}m ${two(s)}s`;
 }
 
 /** `+15° 22′ 11″`, of a declination or a latitude in degrees. */
 export function degreesMinutesSeconds(degrees: number): string {
-  const [d, m, s] = sexagesimal(Math.abs(degrees) * 3600, [60, 60]);
-  return `${degrees < 0 ? '−' : '+'}${two(d!)}° ${two(m!)}′ ${two(s!)}″`;
+  const arcsec = Math.round(degrees * 3600);
+  const [d, m, s] = sexagesimal(Math.abs(arcsec));
+  return `${arcsec < 0 ? '−' : '+'}${two(d)}° ${two(m)}′ ${two(s)}″`;
 }
 
-/** A separation in the unit that people picture: `12′`, `1.4°`, `17°`. */
+/** A separation in the unit that people picture: `9″`, `1.4′`, `12′`, `1.4°`, `17°`. */
 export function angleWords(degrees: number): string {
-  if (degrees < 1 / 60) return `${fixed(degrees * 3600, 0)}″`;
-  if (degrees < 0.995) return `${fixed(degrees * 60, 0)}′`;
-  return `${fixed(degrees, degrees < 9.95 ? 1 : 0)}°`;
+  const arcsec = degrees * 3600;
+  if (arcsec < 59.5) return `${fixed(arcsec, 0)}″`;
+  if (arcsec < 59.5 * 60) return `${compact(arcsec / 60)}′`;
+  return `${compact(degrees)}°`;
 }
+
+/** Two figures below ten, whole numbers above. */
+const compact = (value: number): string => fixed(value, value < 9.95 ? 1 : 0);

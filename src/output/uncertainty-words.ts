@@ -1,42 +1,45 @@
 import { localDateTime, utcMillis } from '../time/index.js';
 import type { UtcMillis } from '../time/index.js';
-import { fixed } from './numbers.js';
 
 const MINUTE = 60;
 const HOUR = 3600;
 const DAY = 86_400;
 
+/** Whole units, rounded so that an error bar is never told more than a quarter of a unit smaller than it is. */
+const units = (seconds: number, unit: number): number => Math.max(1, Math.ceil(seconds / unit - 0.25));
+
 /** A 95 % half-width in plain words, never finer than it deserves: `± 2 min`, `about 4 h either way`. */
 export function uncertaintyWords(seconds: number): string {
-  if (seconds < 0.95) return '± 1 s';
-  if (seconds < 50) return `± ${Math.ceil(seconds)} s`;
-  if (seconds < 90 * MINUTE) return `± ${Math.max(1, Math.round(seconds / MINUTE))} min`;
-  if (seconds < 36 * HOUR) return `about ${fixed(seconds / HOUR, 0)} h either way`;
-  return `about ${fixed(seconds / DAY, 0)} days either way`;
+  if (seconds < 90 * MINUTE) return uncertaintyShort(seconds);
+  if (seconds < 36 * HOUR) return `about ${units(seconds, HOUR)} h either way`;
+  return `about ${units(seconds, DAY)} days either way`;
 }
 
 /** The same for a table: `± 2 min`, `± 4 h`, `± 3 d`. */
 export function uncertaintyShort(seconds: number): string {
-  if (seconds < 90 * MINUTE) return uncertaintyWords(seconds);
-  if (seconds < 36 * HOUR) return `± ${fixed(seconds / HOUR, 0)} h`;
-  return `± ${fixed(seconds / DAY, 0)} d`;
+  if (seconds < 50) return `± ${units(seconds, 1)} s`;
+  if (seconds < 90 * MINUTE) return `± ${units(seconds, MINUTE)} min`;
+  if (seconds < 36 * HOUR) return `± ${units(seconds, HOUR)} h`;
+  return `± ${units(seconds, DAY)} d`;
 }
 
 /** How finely an instant may be told: no digit that is not known. */
-type Grain = 'second' | 'minute' | 'ten minutes' | 'hour' | 'day';
+export type Grain = 'second' | 'minute' | 'ten minutes' | 'hour' | 'day';
 
-function grainOf(uncertaintySeconds: number): Grain {
-  if (uncertaintySeconds < 10) return 'second';
-  if (uncertaintySeconds < 20 * MINUTE) return 'minute';
+/** The finest unit of which the half-width is fewer than ten. */
+export function grainOf(uncertaintySeconds: number): Grain {
+  if (units(uncertaintySeconds, 1) < 10) return 'second';
+  if (units(uncertaintySeconds, MINUTE) < 10) return 'minute';
   if (uncertaintySeconds < 90 * MINUTE) return 'ten minutes';
-  return uncertaintySeconds < 12 * HOUR ? 'hour' : 'day';
+  return units(uncertaintySeconds, HOUR) < 10 ? 'hour' : 'day';
 }
 
-const grainMillis: Readonly<Record<Exclude<Grain, 'day'>, number>> = {
+const grainMillis: Readonly<Record<Grain, number>> = {
   second: 1000,
   minute: 60_000,
   'ten minutes': 600_000,
   hour: 3_600_000,
+  day: 1,
 };
 
 export interface ToldInstant {
@@ -50,12 +53,10 @@ export interface ToldInstant {
   readonly time: string;
 }
 
-/** An instant on the clocks of a zone, rounded to what its uncertainty allows. */
+/** An instant on the clocks of a zone, rounded (as those clocks count) to what its uncertainty allows. */
 export function tellInstant(utc: UtcMillis, uncertaintySeconds: number, zone: string): ToldInstant {
   const grain = grainOf(uncertaintySeconds);
-  const rounded =
-    grain === 'day' ? utc : utcMillis(Math.round(utc / grainMillis[grain]) * grainMillis[grain]);
-  const local = localDateTime(rounded, zone);
+  const local = localDateTime(roundedOnClock(utc, grainMillis[grain], zone), zone);
   const time = {
     second: local.toFormat('HH:mm:ss'),
     minute: local.toFormat('HH:mm'),
@@ -69,4 +70,10 @@ export function tellInstant(utc: UtcMillis, uncertaintySeconds: number, zone: st
     longDate: local.toFormat('cccc d LLLL yyyy'),
     time,
   };
+}
+
+/** Zones are not always whole hours from UTC, so what is round on a clock need not be round in UTC. */
+function roundedOnClock(utc: UtcMillis, stepMillis: number, zone: string): UtcMillis {
+  const offsetMillis = Math.round(localDateTime(utc, zone).offset * MINUTE) * 1000;
+  return utcMillis(Math.round((utc + offsetMillis) / stepMillis) * stepMillis - offsetMillis);
 }
