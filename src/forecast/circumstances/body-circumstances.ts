@@ -1,4 +1,3 @@
-import { Constellation } from 'astronomy-engine';
 import { bodyFacts } from '../../bodies/index.js';
 import type { SkyPlanet } from '../../bodies/index.js';
 import { LIGHT_AU_PER_DAY } from '../../ephemeris/index.js';
@@ -12,20 +11,12 @@ import {
   wrapPi,
   wrapTwoPi,
 } from '../../math/index.js';
-import type { Vector } from '../../math/index.js';
-import { DAYS_PER_JULIAN_YEAR, ttDays } from '../../time/index.js';
+import { ttDays } from '../../time/index.js';
 import type { TtDays } from '../../time/index.js';
 import type { BodyCircumstances } from '../event.js';
-import {
-  jupiterMagnitude,
-  marsMagnitude,
-  mercuryMagnitude,
-  neptuneMagnitude,
-  saturnMagnitude,
-  uranusMagnitude,
-  venusMagnitude,
-} from './magnitude.js';
-import type { Illumination, Tilt } from './magnitude.js';
+import { constellationOf } from './constellation.js';
+import type { Illumination } from './magnitude.js';
+import { magnitudeOf } from './magnitude-of.js';
 import { viewerLatitudeDeg } from './poles.js';
 import type { SkyGeometry } from './sky-geometry.js';
 
@@ -40,12 +31,12 @@ export function bodyCircumstances(body: SkyPlanet, tt: TtDays, sky: SkyGeometry)
   const lightDays = distanceAu / LIGHT_AU_PER_DAY;
   // The Sun lit the planet, for us, a light-time ago.
   const fromSun = sky.heliocentric(body, ttDays(tt - lightDays));
+  const phaseAngle = angleBetween(fromSun, astrometric);
   const light: Illumination = {
     sunDistanceAu: length(fromSun),
     earthDistanceAu: distanceAu,
-    phaseDeg: degreesFromRadians(angleBetween(fromSun, astrometric)),
+    phaseDeg: degreesFromRadians(phaseAngle),
   };
-  const tilt = tiltOf(body, fromSun, astrometric, tt);
   const ecliptic = sky.apparent(body, 'ecliptic-of-date', tt);
   const sun = sky.apparent('sun', 'ecliptic-of-date', tt);
   const { longitude, latitude } = sphericalOf(ecliptic);
@@ -62,13 +53,13 @@ export function bodyCircumstances(body: SkyPlanet, tt: TtDays, sky: SkyGeometry)
     elongationDeg: degreesFromRadians(angleBetween(ecliptic, sun)),
     elongationSide: wrapPi(longitude - sphericalOf(sun).longitude) >= 0 ? 'east' : 'west',
     phaseAngleDeg: light.phaseDeg,
-    illuminatedFraction: (1 + Math.cos((light.phaseDeg * Math.PI) / 180)) / 2,
-    magnitude: magnitudeOf(body, light, tilt, tt),
+    illuminatedFraction: (1 + Math.cos(phaseAngle)) / 2,
+    magnitude: magnitudeOf(body, light, fromSun, astrometric, tt),
     diameterArcsec: arcsecFromRadians(
       2 * Math.asin(bodyFacts[body].equatorialRadiusKm / (distanceAu * KM_PER_AU)),
     ),
-    ...(body === 'saturn' && tilt !== null ? { ringTiltDeg: tilt.earthLatitudeDeg } : {}),
-    constellation: Constellation(rightAscensionJ2000Hours, declinationJ2000Deg).name,
+    ...(body === 'saturn' ? { ringTiltDeg: viewerLatitudeDeg('saturn', astrometric, tt) } : {}),
+    constellation: constellationOf(rightAscensionJ2000Hours, declinationJ2000Deg),
     rightAscensionJ2000Hours,
     declinationJ2000Deg,
     rightAscensionOfDateHours: hoursFromRadians(wrapTwoPi(ofDate.longitude)),
@@ -76,34 +67,4 @@ export function bodyCircumstances(body: SkyPlanet, tt: TtDays, sky: SkyGeometry)
     eclipticLongitudeDeg: degreesFromRadians(wrapTwoPi(longitude)),
     eclipticLatitudeDeg: degreesFromRadians(latitude),
   };
-}
-
-function tiltOf(body: SkyPlanet, fromSun: Vector, fromEarth: Vector, tt: TtDays): Tilt | null {
-  if (body !== 'saturn' && body !== 'uranus') return null;
-  return {
-    sunLatitudeDeg: viewerLatitudeDeg(body, fromSun, tt),
-    earthLatitudeDeg: viewerLatitudeDeg(body, fromEarth, tt),
-  };
-}
-
-/** Null where the published formula does not reach; Pluto has none of that standing. */
-function magnitudeOf(body: SkyPlanet, light: Illumination, tilt: Tilt | null, tt: TtDays): number | null {
-  switch (body) {
-    case 'mercury':
-      return mercuryMagnitude(light);
-    case 'venus':
-      return venusMagnitude(light);
-    case 'mars':
-      return marsMagnitude(light);
-    case 'jupiter':
-      return jupiterMagnitude(light);
-    case 'saturn':
-      return saturnMagnitude(light, tilt!);
-    case 'uranus':
-      return uranusMagnitude(light, tilt!);
-    case 'neptune':
-      return neptuneMagnitude(light, 2000 + tt / DAYS_PER_JULIAN_YEAR);
-    case 'pluto':
-      return null;
-  }
 }
