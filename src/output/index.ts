@@ -18,5 +18,11 @@ export { angleWords, degreesMinutesSeconds, fixed, hoursWords, signed } from './
 export { residualsCsv } from './residuals-csv.js';
 export { terminalLines } from './terminal.js';
 export type { TerminalStyle } from './terminal.js';
-export { tellInstant, uncertaintyShort, uncertaintyWords } from './uncertainty-words.js';
-export type { ToldInstant } from './uncertainty-words.js';
+export {
+  dateAndClock,
+  grainOf,
+  tellInstant,
+  uncertaintyShort,
+  uncertaintyWords,
+} from './uncertainty-words.js';
+export type { Grain, ToldInstant } from './uncertainty-words.js';

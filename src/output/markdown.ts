@@ -1,7 +1,6 @@
-import type { Forecast, ForecastEvent } from '../forecast/index.js';
+import type { Forecast } from '../forecast/index.js';
 import type { Site } from '../sky/index.js';
-import { zoneAbbreviation } from '../time/index.js';
-import { tellInstant, uncertaintyShort } from './uncertainty-words.js';
+import { dateAndClock, uncertaintyShort } from './uncertainty-words.js';
 import { bodiesWords, circumstancesLine, kindTitles, seriesWords } from './event-words.js';
 
 /** Text that Markdown and the HTML inside it leave alone. */
@@ -25,7 +24,7 @@ export function eventsMarkdown({ events }: Pick<Forecast, 'events'>, sites: read
   return markdownTable(
     ['when', 'how sure', 'event', 'what is true of it', ...(home === undefined ? [] : [`from ${home.name}`])],
     events.map((event) => [
-      whenWords(event, home?.zone ?? 'UTC'),
+      dateAndClock(event, home?.zone ?? 'UTC'),
       uncertaintyShort(event.uncertaintySeconds.utc),
       [bodiesWords(event), kindTitles[event.kind], seriesWords(event)]
         .filter((word) => word !== null)
@@ -34,9 +33,4 @@ export function eventsMarkdown({ events }: Pick<Forecast, 'events'>, sites: read
       ...(home === undefined ? [] : [event.local[0]?.verdict ?? 'Not in the Earth’s sky.']),
     ]),
   );
-}
-
-function whenWords({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
-  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
-  return [isoDate, weekday, ...(time === '' ? [] : [time, zoneAbbreviation(utc, zone)])].join(' ');
 }

@@ -1,10 +1,10 @@
+import { titleOf } from '../bodies/index.js';
 import type { ForecastEvent } from '../forecast/index.js';
-import type { Site } from '../sky/index.js';
-import { zoneAbbreviation } from '../time/index.js';
-import { bodiesWords, circumstancesLine, seriesWords } from './event-words.js';
 import { cycleLabel } from '../forecast/index.js';
+import type { Site } from '../sky/index.js';
+import { bodiesWords, circumstancesLine, seriesWords } from './event-words.js';
 import { signed } from './numbers.js';
-import { tellInstant, uncertaintyShort } from './uncertainty-words.js';
+import { dateAndClock, uncertaintyShort } from './uncertainty-words.js';
 
 /** How the terminal stresses a word; the identity where colour is unwanted. */
 export interface TerminalStyle {
@@ -12,32 +12,52 @@ export interface TerminalStyle {
   readonly quiet: (text: string) => string;
 }
 
-/** Below this a residual is told in hours. */
-const HOURS_BELOW_DAYS = 2;
-
-interface TerminalColumn {
+interface Column {
   readonly cell: (event: ForecastEvent) => string;
-  /** What is written instead on a narrow terminal; nothing by default. */
-  readonly short?: (event: ForecastEvent) => string;
-  readonly tone: keyof TerminalStyle | null;
+  readonly tone?: keyof TerminalStyle;
 }
 
-/** The columns by the order in which a narrow terminal gives them up, the first to go last. */
-const columnsFor = (zone: string): readonly TerminalColumn[] => [
-  { cell: (event) => when(event, zone), tone: null },
-  { cell: ({ uncertaintySeconds }) => uncertaintyShort(uncertaintySeconds.utc), tone: 'quiet' },
-  { cell: ({ kind }) => kind, tone: 'strong' },
-  { cell: (event) => `${bodiesWords(event)}, ${circumstancesLine(event)}`, short: bodiesWords, tone: null },
-  { cell: cycleWords, tone: 'quiet' },
-  { cell: ({ residualDays }) => residualWords('mean', residualDays.mean), tone: 'quiet' },
-  { cell: ({ residualDays }) => residualWords('kepler', residualDays.kepler), tone: 'quiet' },
-];
-/** The first columns stay whatever happens. */
-const ALWAYS_KEPT = 4;
+/** Below this a Kepler residual is told in hours. */
+const HOURS_BELOW_DAYS = 2;
+
+const uncertainty: Column = {
+  cell: ({ uncertaintySeconds }) => uncertaintyShort(uncertaintySeconds.utc),
+  tone: 'quiet',
+};
+const kind: Column = { cell: (event) => event.kind, tone: 'strong' };
+const bodiesAndCircumstances: Column = {
+  cell: (event) => `${bodiesWords(event)}, ${circumstancesLine(event)}`,
+};
+const bodies: Column = { cell: (event) => event.bodies.map(titleOf).join('–') };
+const cycleAndSeries: Column = {
+  cell: (event) => [cycleWords(event), seriesWords(event)].filter((word) => word !== null).join(', '),
+  tone: 'quiet',
+};
+const cycle: Column = { cell: cycleWords, tone: 'quiet' };
+const mean: Column = {
+  cell: ({ residualDays }) => (residualDays.mean === null ? '' : `mean ${signed(residualDays.mean, 1)} d`),
+  tone: 'quiet',
+};
+const kepler: Column = { cell: keplerWords, tone: 'quiet' };
+
+/** What a line holds, from the widest terminal to the narrowest: the three answers go before the names do. */
+function layoutsFor(zone: string): readonly (readonly Column[])[] {
+  const when: Column = { cell: (event) => dateAndClock(event, zone) };
+  return [
+    [when, uncertainty, kind, bodiesAndCircumstances, cycleAndSeries, mean, kepler],
+    [when, uncertainty, kind, bodiesAndCircumstances, cycle, mean, kepler],
+    [when, uncertainty, kind, bodies, cycle, mean, kepler],
+    [when, uncertainty, kind, bodies, mean, kepler],
+    [when, uncertainty, kind, bodies, cycle],
+    [when, uncertainty, kind, bodies],
+    [when, bodies, kind],
+  ];
+}
 
 /**
- * One line an event, aligned, at most `width` columns: a narrower terminal loses columns of data, and what is still
- * too long is cut; no line wraps.
+ * One line an event, aligned, at most `width` columns: a narrower terminal gets fewer columns of data, and what is then
+ * still too long is cut; no line wraps.
+ * @param site on whose clocks times are told; UTC where there is none
  */
 export function terminalLines(
   events: readonly ForecastEvent[],
@@ -45,59 +65,52 @@ export function terminalLines(
   width: number,
   style: TerminalStyle,
 ): string[] {
-  const columns = columnsFor(site?.zone ?? 'UTC');
-  const full = columns.map(({ cell, tone }) => filled(events.map(cell), tone));
-  const short = columns.map(({ cell, short: shorter, tone }) => filled(events.map(shorter ?? cell), tone));
-  const choices = [
-    ...columns.map((_, i) => full.slice(0, columns.length - i)).filter((kept) => kept.length >= ALWAYS_KEPT),
-    short.slice(0, ALWAYS_KEPT),
-  ];
-  const chosen = choices.find((kept) => widthOf(kept) <= width) ?? short.slice(0, ALWAYS_KEPT);
+  const layouts = layoutsFor(site?.zone ?? 'UTC').map((columns) =>
+    columns.map((column) => filled(column, events)),
+  );
+  const chosen = layouts.find((columns) => widthOf(columns) <= width) ?? layouts.at(-1)!;
   return events.map((_, row) => line(chosen, row, width, style));
 }
 
 interface FilledColumn {
   readonly cells: readonly string[];
   readonly width: number;
-  readonly tone: keyof TerminalStyle | null;
+  readonly tone: keyof TerminalStyle | undefined;
 }
 
-const filled = (cells: readonly string[], tone: keyof TerminalStyle | null): FilledColumn => ({
-  cells,
-  width: cells.reduce((widest, cell) => Math.max(widest, cell.length), 0),
-  tone,
-});
+function filled({ cell, tone }: Column, events: readonly ForecastEvent[]): FilledColumn {
+  const cells = events.map(cell);
+  return { cells, width: cells.reduce((widest, { length }) => Math.max(widest, length), 0), tone };
+}
 
 const GAP = '  ';
 const widthOf = (columns: readonly FilledColumn[]): number =>
-  columns.reduce((sum, { width }) => sum + width + GAP.length, -GAP.length);
+  columns.reduce((sum, column) => sum + column.width + GAP.length, -GAP.length);
 
+/** Cut first and styled after, so that a style never counts as text. */
 function line(columns: readonly FilledColumn[], row: number, width: number, style: TerminalStyle): string {
-  let room = width;
+  const last = columns.findLastIndex(({ cells }) => cells[row] !== '');
+  let column = 0;
   return columns
-    .map(({ cells, width: wide, tone }) => {
-      const text = cells[row]!.padEnd(wide).slice(0, Math.max(0, room));
-      room -= wide + GAP.length;
-      return tone === null ? text : style[tone](text);
+    .slice(0, last + 1)
+    .map(({ cells, width: wide, tone }, i) => {
+      const text = cells[row]!.slice(0, Math.max(0, width - column));
+      const gap = i === last ? '' : ' '.repeat(wide - text.length) + GAP;
+      const kept = gap.slice(0, Math.max(0, width - column - text.length));
+      column += wide + GAP.length;
+      return (tone === undefined || text === '' ? text : style[tone](text)) + kept;
     })
-    .join(GAP)
+    .join('')
     .trimEnd();
 }
 
-function when({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
-  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
-  const clock = zone === 'UTC' ? 'UTC' : zoneAbbreviation(utc, zone);
-  return `${isoDate} ${weekday} ${time} ${clock}`;
+function cycleWords({ cycle: number }: ForecastEvent): string {
+  return `cycle ${cycleLabel(number)}`;
 }
 
-function cycleWords(event: ForecastEvent): string {
-  const series = seriesWords(event);
-  return `cycle ${cycleLabel(event.cycle)}${series === null ? '' : `, ${series}`}`;
-}
-
-function residualWords(name: string, days: number | null): string {
+function keplerWords({ residualDays: { kepler: days } }: ForecastEvent): string {
   if (days === null) return '';
-  return Math.abs(days) < HOURS_BELOW_DAYS && name === 'kepler'
-    ? `${name} ${signed(days * 24, 1)} h`
-    : `${name} ${signed(days, 1)} d`;
+  return Math.abs(days) < HOURS_BELOW_DAYS
+    ? `kepler ${signed(days * 24, 1)} h`
+    : `kepler ${signed(days, 1)} d`;
 }

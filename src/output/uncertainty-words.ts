@@ -1,4 +1,5 @@
-import { localDateTime, utcMillis } from '../time/index.js';
+import type { ForecastEvent } from '../forecast/index.js';
+import { localDateTime, utcMillis, zoneAbbreviation } from '../time/index.js';
 import type { UtcMillis } from '../time/index.js';
 
 const MINUTE = 60;
@@ -70,6 +71,15 @@ export function tellInstant(utc: UtcMillis, uncertaintySeconds: number, zone: st
     longDate: local.toFormat('cccc d LLLL yyyy'),
     time,
   };
+}
+
+/** Of an event, for a table: `2027-02-19 Fri 15:45 GMT`, `2042-09-03 Wed about 17 h UTC`, `2042-09-03 Wed`. */
+export function dateAndClock(
+  { utc, uncertaintySeconds }: Pick<ForecastEvent, 'utc' | 'uncertaintySeconds'>,
+  zone: string,
+): string {
+  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
+  return [isoDate, weekday, ...(time === '' ? [] : [time, zoneAbbreviation(utc, zone)])].join(' ');
 }
 
 /** Zones are not always whole hours from UTC, so what is round on a clock need not be round in UTC. */

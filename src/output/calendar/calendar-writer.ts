@@ -1,6 +1,6 @@
 import { DateTime } from 'luxon';
 import { ICalCalendar, ICalEvent, ICalEventStatus, ICalEventTransparency } from 'ical-generator';
-import type { UtcMillis } from '../../time/index.js';
+import type { LocalDate, UtcMillis } from '../../time/index.js';
 
 /** What a calendar says of itself. */
 export interface CalendarWords {
@@ -12,9 +12,7 @@ export interface CalendarWords {
 export interface CalendarEntry {
   readonly uid: string;
   readonly sequence: number;
-  readonly start: UtcMillis;
-  /** After `start`. */
-  readonly end: UtcMillis;
+  readonly when: CalendarSpan;
   readonly summary: string;
   readonly description: string;
   readonly categories: readonly string[];
@@ -23,6 +21,9 @@ export interface CalendarEntry {
   /** Entries that belong together with this one. */
   readonly relatedUids: readonly string[];
 }
+
+/** From an instant to a later one, or one whole day that no clock divides. */
+export type CalendarSpan = { readonly from: UtcMillis; readonly to: UtcMillis } | { readonly day: LocalDate };
 
 export interface CalendarPlace {
   readonly name: string;
@@ -42,12 +43,15 @@ const statuses = {
 } as const;
 
 /**
- * Writes an iCalendar object (RFC 5545, with NAME of RFC 7986), lines folded and ended by CRLF.
+ * Writes an iCalendar object (RFC 5545, with NAME of RFC 7986), lines folded and ended by CRLF. It is published, not
+ * sent: no METHOD. Entries never make a diary look busy.
  *
  * The only module that knows the calendar library, and what to keep from it: it takes the host's zone from plain
- * dates, cuts seconds, swaps ends, makes up missing starts and ids, drops a GEO at zero, leaves NAME and UID unescaped,
- * and forgets the last line's end.
+ * dates, cuts seconds, swaps ends, makes up missing starts and ids, strips the Z from stamps where the calendar has a
+ * zone, drops a GEO at zero, leaves NAME and UID unescaped, has no RELATED-TO, breaks alarms and the commas of a URL
+ * (so there are none), and forgets the last line's end.
  * @param stamp DTSTAMP of every entry: data of the plan, not the clock
+ * @throws CalendarEntryError for an entry that the library would silently write as another
  */
 export function writeCalendar(
   words: CalendarWords,
@@ -59,6 +63,7 @@ export function writeCalendar(
     name: escapedText(words.name),
     description: escapedText(words.description),
   });
+  checkUnique(entries);
   for (const entry of entries) {
     checkEntry(entry);
     calendar.createEvent(new EntryWithRawLines(entry, stamp, calendar));
@@ -73,14 +78,13 @@ class EntryWithRawLines extends ICalEvent {
   constructor(entry: CalendarEntry, stamp: UtcMillis, calendar: ICalCalendar) {
     super(
       {
+        ...libraryTimes(entry.when),
         id: entry.uid,
         sequence: entry.sequence,
         stamp: utc(stamp),
-        start: utc(entry.start),
-        end: utc(entry.end),
         summary: oneLine(entry.summary),
         description: cleaned(entry.description),
-        categories: entry.categories.map((name) => ({ name })),
+        categories: entry.categories.map((name) => ({ name: oneLine(name) })),
         status: statuses[entry.status],
         transparency: ICalEventTransparency.TRANSPARENT,
         ...(entry.place === null ? {} : { location: oneLine(entry.place.name) }),
@@ -88,7 +92,7 @@ class EntryWithRawLines extends ICalEvent {
       calendar,
     );
     this.rawLines = [
-      ...(entry.place === null ? [] : [`GEO:${entry.place.latitudeDeg};${entry.place.longitudeDeg}`]),
+      ...(entry.place === null ? [] : [geoLine(entry.place)]),
       ...entry.relatedUids.map((uid) => `RELATED-TO;RELTYPE=SIBLING:${uid}`),
     ];
   }
@@ -99,24 +103,56 @@ class EntryWithRawLines extends ICalEvent {
   }
 }
 
-/** To the whole second, in UTC and in no one's locale. */
-const utc = (at: UtcMillis): DateTime =>
-  DateTime.fromMillis(Math.round(at / 1000) * 1000, { zone: 'utc', locale: 'en' });
+/** The last day of an entry is not included, so a whole day ends on the next. */
+function libraryTimes(when: CalendarSpan) {
+  if (!('day' in when)) return { start: utc(when.from), end: utc(when.to), allDay: false };
+  const start = DateTime.fromISO(when.day, { zone: 'utc', locale: 'en' });
+  return { start, end: start.plus({ days: 1 }), allDay: true };
+}
 
-function checkEntry({ uid, start, end, sequence }: CalendarEntry): void {
-  const fault = !/^[\x21-\x7e]+$/.test(uid)
-    ? 'its uid must be printable ASCII without spaces'
-    : !Number.isFinite(start) || !(end > start)
-      ? 'it must start at an instant and end after it'
+const wholeSecond = (at: UtcMillis): number => Math.round(at / 1000) * 1000;
+
+/** To the whole second, in UTC and in no one's locale. */
+const utc = (at: UtcMillis): DateTime => DateTime.fromMillis(wholeSecond(at), { zone: 'utc', locale: 'en' });
+
+/** RFC 5545 §3.8.1.6: six decimals, never an exponent. */
+const geoLine = ({ latitudeDeg, longitudeDeg }: CalendarPlace): string =>
+  `GEO:${latitudeDeg.toFixed(6)};${longitudeDeg.toFixed(6)}`;
+
+/** Characters that need no escaping in any property, so that a uid reads the same everywhere. */
+const UID = /^[A-Za-z0-9.+_-]+@[a-z0-9.-]+$/;
+
+function checkEntry({ uid, when, sequence, relatedUids }: CalendarEntry): void {
+  const fault = ![uid, ...relatedUids].every((id) => UID.test(id))
+    ? 'its uid and those it relates to must be letters, digits and . + _ - before one @'
+    : !lasts(when)
+      ? 'it must be a day, or start at an instant and end at least a second after it'
       : !Number.isInteger(sequence) || sequence < 0
         ? 'its sequence must be a whole number from 0'
         : null;
   if (fault !== null) throw new CalendarEntryError(`calendar entry ${JSON.stringify(uid)}: ${fault}`);
 }
 
-/** Control characters have no place in a calendar; a line break stays one. */
+const lasts = (when: CalendarSpan): boolean =>
+  'day' in when
+    ? DateTime.fromISO(when.day, { zone: 'utc' }).isValid
+    : wholeSecond(when.to) > wholeSecond(when.from) && Number.isFinite(when.to);
+
+function checkUnique(entries: readonly CalendarEntry[]): void {
+  const seen = new Set<string>();
+  for (const { uid } of entries) {
+    if (seen.has(uid))
+      throw new CalendarEntryError(`calendar entry ${JSON.stringify(uid)}: its uid occurs twice`);
+    seen.add(uid);
+  }
+}
+
+/** Control characters and halves of characters have no place in a calendar; a line break stays one. */
 const cleaned = (text: string): string =>
-  text.replace(/\r\n?/g, '\n').replace(/[\u0000-\u0009\u000b-\u001f\u007f\u0085\u2028\u2029]/g, ' ');
+  text
+    .replace(/\r\n?|[\u0085\u2028\u2029]/g, '\n')
+    .replace(/[\u0000-\u0009\u000b-\u001f\u007f]/g, ' ')
+    .replace(/\p{Surrogate}/gu, '\ufffd');
 
 const oneLine = (text: string): string => cleaned(text).replace(/\s*\n\s*/g, ' ');
 

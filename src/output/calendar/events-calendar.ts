@@ -1,101 +1,108 @@
 import type { Forecast, ForecastEvent } from '../../forecast/index.js';
 import { cycleLabel } from '../../forecast/index.js';
-import type { LocalView, Site } from '../../sky/index.js';
-import { utcFromTt, utcMillis } from '../../time/index.js';
+import type { Site } from '../../sky/index.js';
+import { localDate, utcFromTt, utcMillis, zoneAbbreviation } from '../../time/index.js';
 import type { TtDays, UtcMillis } from '../../time/index.js';
-import { cautions, needsSunCaution } from '../cautions.js';
+import { cautionsOf } from '../cautions.js';
 import { circumstancesLine, kindTitles, seriesWords, summaryOf } from '../event-words.js';
 import { headlineOf } from '../headline.js';
 import { signed } from '../numbers.js';
-import { tellInstant, uncertaintyWords } from '../uncertainty-words.js';
+import { grainOf, tellInstant, uncertaintyWords } from '../uncertainty-words.js';
 import { writeCalendar } from './calendar-writer.js';
-import type { CalendarEntry } from './calendar-writer.js';
+import type { CalendarEntry, CalendarSpan, CalendarWords } from './calendar-writer.js';
 
 const MINUTE_MILLIS = 60_000;
 
-export interface CalendarTitle {
-  readonly name: string;
-  readonly description: string;
-}
-
 /**
- * The events of a forecast as a calendar: an entry of a minute each, in UTC, with the local times in its words. Entries
- * keep their uid from one forecast to the next, so importing again updates and never doubles.
+ * The events of a forecast as a calendar. An instant is an entry of a minute, in UTC, with the local times in its words;
+ * one that is not known to hours is a whole day of the first site. Entries keep their uid from one forecast to the next,
+ * so importing again updates and never doubles.
  * @param stamp the plan's own date, written as DTSTAMP
  */
 export function eventsCalendar(
-  title: CalendarTitle,
+  words: CalendarWords,
   forecast: Forecast,
   sites: readonly Site[],
   stamp: UtcMillis,
 ): string {
-  const meetingMates = matesByEvent(forecast);
+  const siblings = siblingsOf(forecast);
   return writeCalendar(
-    title,
-    forecast.events.map((event) => entryOf(event, sites, meetingMates.get(event.id) ?? [])),
+    words,
+    forecast.events.map((event) => entryOf(event, sites, siblings.get(event.id) ?? [])),
     stamp,
   );
 }
 
 export const uidOf = (eventId: string): string => `${eventId}@synodos`;
 
-function entryOf(event: ForecastEvent, sites: readonly Site[], mates: readonly string[]): CalendarEntry {
-  const start = utcMillis(Math.round(event.utc / MINUTE_MILLIS) * MINUTE_MILLIS);
-  const home = sites[0];
+/** The sequence is 0: clients that get a newer DTSTAMP with the same uid and sequence replace the entry. */
+function entryOf(event: ForecastEvent, sites: readonly Site[], siblings: readonly string[]): CalendarEntry {
+  const [home] = sites;
   return {
     uid: uidOf(event.id),
     sequence: 0,
-    start,
-    end: utcMillis(start + MINUTE_MILLIS),
+    when: whenOf(event, home?.zone ?? 'UTC'),
     summary: summaryOf(event),
     description: descriptionOf(event, sites),
     categories: [kindTitles[event.kind]],
     status: event.certain ? 'confirmed' : 'tentative',
     place: home !== undefined && event.local[0]?.bestLook != null ? home : null,
-    relatedUids: mates.map(uidOf),
+    relatedUids: siblings.map(uidOf),
   };
 }
 
-/** First what to do, then why, then how sure. */
+function whenOf({ utc, uncertaintySeconds }: ForecastEvent, zone: string): CalendarSpan {
+  if (grainOf(uncertaintySeconds.utc) === 'day') {
+    return { day: localDate(tellInstant(utc, uncertaintySeconds.utc, zone).isoDate) };
+  }
+  const from = utcMillis(Math.round(utc / MINUTE_MILLIS) * MINUTE_MILLIS);
+  return { from, to: utcMillis(from + MINUTE_MILLIS) };
+}
+
+/** First what to do, and what not to; then why; then how sure. */
 function descriptionOf(event: ForecastEvent, sites: readonly Site[]): string {
+  const [home, ...others] = sites;
   const series = seriesWords(event);
   return [
-    headlineOf(event),
+    headlineOf(event, home?.zone),
+    ...others.flatMap(({ name }, i) => {
+      const view = event.local[i + 1];
+      return view === undefined ? [] : [`${name}: ${view.verdict}`];
+    }),
+    ...cautionsOf(event).map((caution) => `Caution. ${caution}`),
     circumstancesLine(event),
-    instantLine(event, 'UTC', 'UTC'),
-    ...event.local.map((view, i) => localLine(event, view, sites[i]!)),
-    event.interval === null
-      ? null
-      : `From ${dateOf(event.interval.from)} to ${dateOf(event.interval.to)}: ${event.interval.meaning}.`,
-    event.certain ? null : 'Another ephemeris of the same quality could lack this event.',
-    residualLine(event),
+    `UTC: ${clockWords(event, 'UTC')}, ${uncertaintyWords(event.uncertaintySeconds.utc)}`,
+    ...sites.map((site) => `${site.name}: ${clockWords(event, site.zone)}`),
+    ...(event.interval === null
+      ? []
+      : [
+          `From ${dayWords(event.interval.from)} to ${dayWords(event.interval.to)}: ${event.interval.meaning}.`,
+        ]),
+    ...(event.certain ? [] : ['Another ephemeris of the same quality could lack this event.']),
+    ...residualLines(event),
     `Cycle ${cycleLabel(event.cycle)}${series === null ? '' : `, ${series}`}; ${event.id}`,
-    needsSunCaution(event) ? `Caution. ${cautions.besideTheSun}` : null,
-  ]
-    .filter((line) => line !== null)
-    .join('\n');
+  ].join('\n');
 }
 
-function instantLine({ utc, uncertaintySeconds }: ForecastEvent, zone: string, clock: string): string {
+function clockWords({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
   const { longDate, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
-  return `${clock}: ${[longDate, time].filter((word) => word !== '').join(', ')} (${uncertaintyWords(uncertaintySeconds.utc)})`;
+  const clock = zone === 'UTC' ? '' : ` ${zoneAbbreviation(utc, zone)}`;
+  return time === '' ? longDate : `${longDate}, ${time}${clock}`;
 }
 
-const localLine = (event: ForecastEvent, view: LocalView, site: Site): string =>
-  `${instantLine(event, view.zone, site.name)}. ${view.verdict}`;
+/** Intervals are told in days. */
+const dayWords = (tt: TtDays): string => tellInstant(utcFromTt(tt), 0, 'UTC').longDate;
 
-const dateOf = (tt: TtDays): string => tellInstant(utcFromTt(tt), 0, 'UTC').longDate;
-
-function residualLine({ residualDays: { mean, kepler } }: ForecastEvent): string | null {
+function residualLines({ residualDays: { mean, kepler } }: ForecastEvent): string[] {
   const parts = [
     ...(mean === null ? [] : [`mean cycle ${signed(mean, 1)} d`]),
     ...(kepler === null ? [] : [`Kepler orbits ${signed(kepler * 24, 1)} h`]),
   ];
-  return parts.length === 0 ? null : `Refined minus first estimate: ${parts.join(', ')}.`;
+  return parts.length === 0 ? [] : [`Refined minus first estimate: ${parts.join(', ')}.`];
 }
 
 /** For each event, the other moments of its meeting. */
-function matesByEvent({ events }: Forecast): Map<string, string[]> {
+function siblingsOf({ events }: Forecast): Map<string, string[]> {
   const byMeeting = new Map<string, string[]>();
   for (const { id, meeting } of events) {
     if (meeting !== null) byMeeting.set(meeting, [...(byMeeting.get(meeting) ?? []), id]);
