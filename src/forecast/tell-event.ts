@@ -90,7 +90,7 @@ function circumstancesOf({ kind, subject, tt }: Finding, sky: TrackedSky): Circu
 const closenessKinds: readonly KindName[] = ['opposition', 'closest-approach'];
 
 /** What circumstances read, on exact places. */
-const geometryFor = (sky: TrackedSky): SkyGeometry => ({
+export const geometryFor = (sky: TrackedSky): SkyGeometry => ({
   apparent: (body, frame, tt) => sky.apparent(body, frame, tt),
   astrometric: (body, tt) => sky.places.astrometric(body, tt),
   heliocentric: (planet, tt) => sky.geometry.heliocentric(planet, tt),
