@@ -82,3 +82,6 @@ export const meanElements: Readonly<Record<ElementTable, Readonly<Record<Planet,
   'table-1': table1,
   'table-2': table2,
 };
+
+/** Cycles are numbered by Table 1 at every date, whatever else is used: its linear mean longitudes never change. */
+export const numberingElements = meanElements['table-1'];

@@ -1,10 +1,11 @@
 import type { Planet } from '../bodies/index.js';
-import { RADIANS_PER_DEGREE, wrapPi } from '../math/index.js';
+import { RADIANS_PER_DEGREE, scale, wrapPi } from '../math/index.js';
 import type { Vector } from '../math/index.js';
 import { DAYS_PER_JULIAN_CENTURY, centuriesOf } from '../time/index.js';
 import type { TtDays } from '../time/index.js';
+import { eccentricAnomaly } from './eccentric-anomaly.js';
 import { meanElements } from './elements.js';
-import type { ElementTable } from './elements.js';
+import type { ElementTable, MeanElements } from './elements.js';
 
 /** Position, velocity and acceleration: au, au a day, au a day². */
 export interface OrbitalMotion {
@@ -13,88 +14,96 @@ export interface OrbitalMotion {
   readonly acceleration: Vector;
 }
 
-const MAX_KEPLER_STEPS = 20;
-const KEPLER_TOLERANCE = 1e-13;
-
 /**
- * The eccentric anomaly, radians, by Newton's method from Danby's start.
- * @param meanAnomaly radians in (−π, π]
- * @param eccentricity 0 ≤ e < 1
- * Source: Danby, Fundamentals of Celestial Mechanics, 2nd ed. (1988), §6.6.
- */
-export function eccentricAnomaly(meanAnomaly: number, eccentricity: number): number {
-  let anomaly = meanAnomaly + 0.85 * eccentricity * Math.sign(Math.sin(meanAnomaly));
-  for (let step = 0; step < MAX_KEPLER_STEPS; step++) {
-    const sine = eccentricity * Math.sin(anomaly);
-    const cosine = eccentricity * Math.cos(anomaly);
-    const miss = anomaly - sine - meanAnomaly;
-    if (Math.abs(miss) < KEPLER_TOLERANCE) break;
-    // Halley's correction of Newton's step: third order.
-    const slope = 1 - cosine;
-    anomaly -= miss / (slope - (miss * sine) / (2 * slope));
-  }
-  return anomaly;
-}
-
-/**
- * A planet's heliocentric motion on its mean Kepler orbit, geometric, axes of the mean ecliptic and equinox of
- * J2000.0. Velocity and acceleration leave out the slow drift of the elements.
- * Error: Table 1 up to 15″ (Venus) … 600″ (Saturn) within 1800–2050; Table 2 up to 20″ … 1000″ over six millennia.
- * Source: Standish, as in `elements.ts`.
+ * A planet's heliocentric motion on its mean Kepler orbit, geometric, axes of the mean ecliptic and equinox of J2000.0;
+ * for the Earth, that of the Earth–Moon barycentre.
+ *
+ * Error in heliocentric longitude: Table 1 10″ (Neptune), 15″–50″ (Mercury, Venus, Earth, Mars, Uranus), 400″ (Jupiter),
+ * 600″ (Saturn) within 1800–2050; Table 2 20″ (Mercury) … 2000″ (Uranus) within 3000 BC–3000 AD.
+ * Velocity and acceleration are those of the two-body orbit of the instant, its mean motion that of the mean longitude;
+ * the drift of the other elements is left out, which is 1e-4 of the velocity at most (Pluto 2e-4).
+ * Source: Standish, as in `elements.ts`, with his table of nominal errors.
  */
 export function keplerMotion(planet: Planet, tt: TtDays, table: ElementTable): OrbitalMotion {
-  const T = centuriesOf(tt);
-  const elements = meanElements[table][planet];
-  const at = ([value, perCentury]: readonly [number, number]): number => value + perCentury * T;
-  const a = at(elements.a);
-  const e = at(elements.eccentricity);
-  const inclination = at(elements.inclinationDeg) * RADIANS_PER_DEGREE;
-  const perihelionDeg = at(elements.perihelionLongitudeDeg);
-  const nodeDeg = at(elements.nodeLongitudeDeg);
-  const terms = elements.anomalyTerms;
-  const extraDeg =
-    terms === undefined
-      ? 0
-      : terms.b * T * T +
-        terms.c * Math.cos(terms.fDeg * T * RADIANS_PER_DEGREE) +
-        terms.s * Math.sin(terms.fDeg * T * RADIANS_PER_DEGREE);
-  const meanAnomaly = wrapPi((at(elements.meanLongitudeDeg) - perihelionDeg + extraDeg) * RADIANS_PER_DEGREE);
-  const anomalyRatePerDay =
-    ((elements.meanLongitudeDeg[1] - elements.perihelionLongitudeDeg[1]) * RADIANS_PER_DEGREE) /
-    DAYS_PER_JULIAN_CENTURY;
-
+  const orbit = orbitAt(meanElements[table][planet], centuriesOf(tt));
+  const { a, e, meanAnomaly, meanMotionPerDay } = orbit;
   const anomaly = eccentricAnomaly(meanAnomaly, e);
-  const [sine, cosine] = [Math.sin(anomaly), Math.cos(anomaly)];
-  const flattening = Math.sqrt(1 - e * e);
-  const anomalyRate = anomalyRatePerDay / (1 - e * cosine);
-  const x = a * (cosine - e);
-  const y = a * flattening * sine;
-  const toEcliptic = orbitToEcliptic(
-    (perihelionDeg - nodeDeg) * RADIANS_PER_DEGREE,
-    nodeDeg * RADIANS_PER_DEGREE,
-    inclination,
-  );
-  const radius = a * (1 - e * cosine);
-  const pull = -(anomalyRatePerDay ** 2) * (a / radius) ** 3;
+  const sine = Math.sin(anomaly);
+  const cosine = Math.cos(anomaly);
+  const nearness = 1 / (1 - e * cosine);
+  const semiMinor = a * Math.sqrt(1 - e * e);
+  const anomalyRate = meanMotionPerDay * nearness;
+  const inSpace = planeToEcliptic(orbit);
+  const position = inSpace(a * (cosine - e), semiMinor * sine);
   return {
-    position: toEcliptic(x, y),
-    velocity: toEcliptic(-a * sine * anomalyRate, a * flattening * cosine * anomalyRate),
-    acceleration: toEcliptic(pull * x, pull * y),
+    position,
+    velocity: inSpace(-a * sine * anomalyRate, semiMinor * cosine * anomalyRate),
+    acceleration: scale(position, -(meanMotionPerDay ** 2) * nearness ** 3),
   };
 }
 
-/** From the orbit's own plane (x to perihelion) to the ecliptic. */
-function orbitToEcliptic(
-  argument: number,
-  node: number,
-  inclination: number,
-): (x: number, y: number) => Vector {
-  const [sw, cw] = [Math.sin(argument), Math.cos(argument)];
-  const [sn, cn] = [Math.sin(node), Math.cos(node)];
-  const [si, ci] = [Math.sin(inclination), Math.cos(inclination)];
-  return (x, y) => ({
-    x: (cw * cn - sw * sn * ci) * x + (-sw * cn - cw * sn * ci) * y,
-    y: (cw * sn + sw * cn * ci) * x + (-sw * sn + cw * cn * ci) * y,
-    z: sw * si * x + cw * si * y,
-  });
+/** How an orbit's plane and its perihelion lie, radians. */
+interface Plane {
+  readonly inclination: number;
+  readonly node: number;
+  /** From the node to the perihelion, along the orbit. */
+  readonly perihelionArgument: number;
+}
+
+/** An orbit at one instant: au, radians, radians a day. */
+interface Orbit extends Plane {
+  readonly a: number;
+  readonly e: number;
+  /** In (−π, π]. */
+  readonly meanAnomaly: number;
+  readonly meanMotionPerDay: number;
+}
+
+function orbitAt(elements: MeanElements, centuries: number): Orbit {
+  const at = (element: readonly [number, number]): number => element[0] + element[1] * centuries;
+  const perihelionDeg = at(elements.perihelionLongitudeDeg);
+  const nodeDeg = at(elements.nodeLongitudeDeg);
+  const extra = anomalyTermsAt(elements, centuries);
+  return {
+    a: at(elements.a),
+    e: at(elements.eccentricity),
+    meanAnomaly: wrapPi((at(elements.meanLongitudeDeg) - perihelionDeg + extra.deg) * RADIANS_PER_DEGREE),
+    meanMotionPerDay:
+      ((elements.meanLongitudeDeg[1] + extra.degPerCentury) * RADIANS_PER_DEGREE) / DAYS_PER_JULIAN_CENTURY,
+    inclination: at(elements.inclinationDeg) * RADIANS_PER_DEGREE,
+    node: nodeDeg * RADIANS_PER_DEGREE,
+    perihelionArgument: (perihelionDeg - nodeDeg) * RADIANS_PER_DEGREE,
+  };
+}
+
+/** What Table 2b adds to the mean anomaly, degrees, and its rate, degrees a century. */
+function anomalyTermsAt(
+  { anomalyTerms: terms }: MeanElements,
+  centuries: number,
+): { readonly deg: number; readonly degPerCentury: number } {
+  if (terms === undefined) return noTerms;
+  const f = terms.fDeg * RADIANS_PER_DEGREE;
+  const sine = Math.sin(f * centuries);
+  const cosine = Math.cos(f * centuries);
+  return {
+    deg: terms.b * centuries * centuries + terms.c * cosine + terms.s * sine,
+    degPerCentury: 2 * terms.b * centuries + f * (terms.s * cosine - terms.c * sine),
+  };
+}
+
+const noTerms = { deg: 0, degPerCentury: 0 };
+
+/** From the orbit's own plane (x to the perihelion, y ahead of it) to the ecliptic. */
+function planeToEcliptic({ inclination, node, perihelionArgument }: Plane): (x: number, y: number) => Vector {
+  const sw = Math.sin(perihelionArgument);
+  const cw = Math.cos(perihelionArgument);
+  const sn = Math.sin(node);
+  const cn = Math.cos(node);
+  const si = Math.sin(inclination);
+  const ci = Math.cos(inclination);
+  return (x, y) => {
+    const alongNode = cw * x - sw * y;
+    const across = sw * x + cw * y;
+    return { x: cn * alongNode - sn * ci * across, y: sn * alongNode + cn * ci * across, z: si * across };
+  };
 }

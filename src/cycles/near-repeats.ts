@@ -1,3 +1,5 @@
+import { checkPeriod } from './period.js';
+
 /** A whole number of cycles that takes nearly a whole number of years. */
 export interface NearRepeat {
   readonly cycles: number;
@@ -12,8 +14,8 @@ export interface NearRepeat {
 export const CALENDAR_YEAR_DAYS = 365.2425;
 
 const DEFAULT_LIMIT_YEARS = 300;
-/** Farther off than a twelfth of the year, nobody would call it a repeat. */
-const NEAR_PART_OF_YEAR = 1 / 12;
+/** Mars is said to repeat after 15 years, 19° off; that Jupiter did so after 11, 28° off, nobody says. */
+const NEAR_DEG = 20;
 /** The digits of a double are used up after that many partial quotients. */
 const MAX_QUOTIENTS = 40;
 /** A misfit below this part of the period is rounding noise: the repeat is exact and the fraction ends. */
@@ -25,12 +27,15 @@ const EXACT = 1e-9;
  * @param periodDays length of one cycle, positive
  * @param yearDays length of the year to return in; `CALENDAR_YEAR_DAYS` keeps the date, a sidereal year the stars
  * @param limitYears the longest repeat to tell of
+ * @throws PeriodError for a length that is not positive and finite
  */
 export function nearRepeats(
   periodDays: number,
   yearDays: number,
   limitYears = DEFAULT_LIMIT_YEARS,
 ): NearRepeat[] {
+  checkPeriod(periodDays);
+  checkPeriod(yearDays);
   const repeats: NearRepeat[] = [];
   let ratio = periodDays / yearDays;
   let [yearsBefore, cyclesBefore, years, cycles] = [0, 1, 1, 0];
@@ -44,9 +49,8 @@ export function nearRepeats(
     ];
     if (years > limitYears) break;
     const misfitDays = cycles * periodDays - years * yearDays;
-    if (years > 0 && Math.abs(misfitDays) < yearDays * NEAR_PART_OF_YEAR) {
-      repeats.push({ cycles, years, misfitDays, misfitDeg: (misfitDays / yearDays) * 360 });
-    }
+    const misfitDeg = (misfitDays / yearDays) * 360;
+    if (years > 0 && Math.abs(misfitDeg) < NEAR_DEG) repeats.push({ cycles, years, misfitDays, misfitDeg });
     if (Math.abs(misfitDays) <= EXACT * periodDays) break;
     ratio = 1 / (ratio - quotient);
   }

@@ -1,7 +1,7 @@
 import type { Body, Planet } from '../bodies/index.js';
-import { centuryRatePerDay, meanElements } from './elements.js';
+import { centuryRatePerDay, numberingElements } from './elements.js';
 
-/** Periods that have no synodic period. Its message says which would have one. */
+/** Periods or planets that do not come round in the way asked for. Its message says which would. */
 export class PeriodError extends Error {
   override readonly name = 'PeriodError';
 }
@@ -12,18 +12,15 @@ export class PeriodError extends Error {
  * Source: Standish, Table 1, whose mean longitudes are counted from the fixed equinox of J2000.0.
  */
 export const siderealPeriodDays = (body: Body): number =>
-  360 / centuryRatePerDay(meanElements['table-1'][planetOf(body)].meanLongitudeDeg[1]);
+  360 / centuryRatePerDay(numberingElements[planetOf(body)].meanLongitudeDeg[1]);
 
 /**
  * After how many days two evenly turning things are again in the same position to each other: 1/S = |1/P₁ − 1/P₂|.
  * Both in days, or both in any other one unit. Throws PeriodError for periods that are not positive, or are equal.
  */
 export function synodicPeriodDays(firstDays: number, secondDays: number): number {
-  for (const days of [firstDays, secondDays]) {
-    if (!(days > 0 && Number.isFinite(days))) {
-      throw new PeriodError(`a period of ${days} days is not a turn: write a length greater than zero`);
-    }
-  }
+  checkPeriod(firstDays);
+  checkPeriod(secondDays);
   if (firstDays === secondDays) {
     throw new PeriodError(
       `two equal periods of ${firstDays} days never gain on each other: the synodic period is for two that differ`,
@@ -42,6 +39,13 @@ export function synodicPeriodOf(first: Body, second: Body): number {
     );
   }
   return synodicPeriodDays(siderealPeriodDays(first), siderealPeriodDays(second));
+}
+
+/** Throws PeriodError for a period that is not a positive, finite number of days. */
+export function checkPeriod(days: number): void {
+  if (!(days > 0 && Number.isFinite(days))) {
+    throw new PeriodError(`a period of ${days} days is not a turn: write a length greater than zero`);
+  }
 }
 
 const planetOf = (body: Body): Planet => (body === 'sun' ? 'earth' : body);
