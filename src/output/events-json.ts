@@ -12,7 +12,7 @@ import { isoUtc, utcFromTt } from '../time/index.js';
 import type { TtDays, UtcMillis } from '../time/index.js';
 import { round, rounded } from './round.js';
 
-/** Names the shape of the document; the JSON Schema has the same id. */
+/** Names the shape of the document, which `data/events.schema.json` describes. */
 export const EVENTS_SCHEMA = 'synodos-events-1';
 export const RESIDUALS_SCHEMA = 'synodos-residuals-1';
 
