@@ -6,5 +6,7 @@ export { kindNames } from './kind-names.js';
 export type { KindName } from './kind-names.js';
 export { NoSuchPairError, residuals } from './residuals.js';
 export type { ResidualRequest, ResidualRow, ResidualSeries, Spread } from './residuals.js';
+export { seasonsOf } from './seasons.js';
+export type { Season, SeasonRequest, SeasonSample, SeasonState } from './seasons.js';
 export { trackedSky } from './tracked-sky.js';
 export type { TrackedSky } from './tracked-sky.js';
