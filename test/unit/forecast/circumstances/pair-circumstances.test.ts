@@ -4,7 +4,7 @@ import {
   pairCircumstances,
 } from '../../../../src/forecast/circumstances/index.js';
 import type { SkyGeometry } from '../../../../src/forecast/circumstances/index.js';
-import { RADIANS_PER_DEGREE, unitVector } from '../../../../src/math/index.js';
+import { RADIANS_PER_DEGREE, dot, unitVector } from '../../../../src/math/index.js';
 import { ttDays, ttFromUtc, utcMillis } from '../../../../src/time/index.js';
 import { librarySky } from './library-sky.js';
 
@@ -30,6 +30,16 @@ describe('two planets together', () => {
     const pair = pairAt(jupiter, saturn);
     expect(pair.positionAngleDeg).toBeCloseTo(positionAngleDeg, 9);
     expect(pair.separationDeg).toBeCloseTo(separationDeg, 9);
+  });
+
+  it('has the angle of the great circle between them far from the equator', () => {
+    // By vectors: the direction from the first to the second against north and east at the first.
+    const [ra, dec] = [10 * RADIANS_PER_DEGREE, 60 * RADIANS_PER_DEGREE];
+    const second = unitVector(40 * RADIANS_PER_DEGREE, 55 * RADIANS_PER_DEGREE);
+    const east = unitVector(ra + Math.PI / 2, 0);
+    const north = unitVector(ra, dec + Math.PI / 2);
+    const expected = Math.atan2(dot(second, east), dot(second, north)) / RADIANS_PER_DEGREE;
+    expect(pairAt([10, 60], [40, 55]).positionAngleDeg).toBeCloseTo(expected, 9);
   });
 
   it('keeps a separation of a thousandth of an arcsecond', () => {
