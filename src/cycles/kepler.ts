@@ -18,11 +18,12 @@ export interface OrbitalMotion {
  * A planet's heliocentric motion on its mean Kepler orbit, geometric, axes of the mean ecliptic and equinox of J2000.0;
  * for the Earth, that of the Earth–Moon barycentre.
  *
- * Error in heliocentric longitude: Table 1 10″ (Neptune), 15″–50″ (Mercury, Venus, Earth, Mars, Uranus), 400″ (Jupiter),
- * 600″ (Saturn) within 1800–2050; Table 2 20″ (Mercury) … 2000″ (Uranus) within 3000 BC–3000 AD.
+ * Error in heliocentric longitude, the worst against VSOP87: Table 1 within 1800–2050 30″ (Mercury, Venus, Earth), 100″
+ * (Mars), 510″ (Jupiter), 740″ (Saturn), 120″ (Uranus), 60″ (Neptune); Table 2 within 1600–2600 25″ (Mercury) … 1260″
+ * (Saturn). The nominal errors that Standish prints are half of that and less.
  * Velocity and acceleration are those of the two-body orbit of the instant, its mean motion that of the mean longitude;
  * the drift of the other elements is left out, which is 1e-4 of the velocity at most (Pluto 2e-4).
- * Source: Standish, as in `elements.ts`, with his table of nominal errors.
+ * Source: Standish, as in `elements.ts`.
  */
 export function keplerMotion(planet: Planet, tt: TtDays, table: ElementTable): OrbitalMotion {
   const orbit = orbitAt(meanElements[table][planet], centuriesOf(tt));
