@@ -65,10 +65,15 @@ export function terminalLines(
   width: number,
   style: TerminalStyle,
 ): string[] {
-  const layouts = layoutsFor(site?.zone ?? 'UTC').map((columns) =>
-    columns.map((column) => filled(column, events)),
+  const columns = new Map<Column, FilledColumn>();
+  const layouts = layoutsFor(site?.zone ?? 'UTC').map((layout) =>
+    layout.map((column) => {
+      const once = columns.get(column) ?? filled(column, events);
+      columns.set(column, once);
+      return once;
+    }),
   );
-  const chosen = layouts.find((columns) => widthOf(columns) <= width) ?? layouts.at(-1)!;
+  const chosen = layouts.find((layout) => widthOf(layout) <= width) ?? layouts.at(-1)!;
   return events.map((_, row) => line(chosen, row, width, style));
 }
 

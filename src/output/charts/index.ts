@@ -1,0 +1,3 @@
+export { CloseUp } from './close-up.js';
+export { OcStems } from './oc-stems.js';
+export { SeasonRibbons } from './season-ribbons.js';
