@@ -1,14 +1,14 @@
 import type { SkyPlanet } from '../bodies/index.js';
-import { localIso, ttDays, utcFromTt, utcMillis, ttFromUtc } from '../time/index.js';
+import { localIso, ttDays, ttFromUtc, utcFromTt, utcMillis } from '../time/index.js';
 import type { TtDays, UtcMillis } from '../time/index.js';
 import { compassWords } from './compass.js';
 import type { SkyOverSite } from './horizontal.js';
+import { darkHours, needDarkSky, safeHours } from './looking-hours.js';
 import type { Night } from './night.js';
-import { TWILIGHT_ALTITUDE_DEG } from './night.js';
 import { refractionDeg } from './refraction.js';
-import { SUN_RISE_ALTITUDE_DEG } from './rise-set.js';
 import { separationDeg } from './separation.js';
 import { horizonAltitudeDeg } from './site.js';
+import type { Stretch } from './stretch.js';
 
 export interface BestLook {
   readonly utc: UtcMillis;
@@ -28,73 +28,89 @@ export interface BestLook {
 
 /** Lower than this, murk and turbulence spoil the view; common practice. */
 export const LOWEST_LOOK_DEG = 5;
-/** These need a dark sky and a telescope; the others show from the end of civil twilight; common practice. */
-const FAINT: readonly SkyPlanet[] = ['uranus', 'neptune', 'pluto'];
+
+/**
+ * How far below a body the Sun must be, in altitude, for the naked eye to pick the body out of the twilight: the
+ * arcus visionis, the largest for each planet. Fainter bodies wait for a dark sky anyway.
+ * Source: C. Schoch, in Langdon & Fotheringham, The Venus Tablets of Ammizaduga (1928).
+ */
+const ARCUS_VISIONIS_DEG: Readonly<Partial<Record<SkyPlanet, number>>> = {
+  mercury: 13,
+  venus: 6,
+  mars: 14.5,
+  jupiter: 9.3,
+  saturn: 13,
+};
+
 const MINUTE_DAYS = 1 / 1440;
-/** Nobody looks while any part of the Sun can still, or could soon, be met with an eyepiece. */
-const AFTER_SUNSET_DAYS = 5 * MINUTE_DAYS;
-const BEFORE_SUNRISE_DAYS = 10 * MINUTE_DAYS;
-const COARSE_STEP_DAYS = 10 * MINUTE_DAYS;
+const MINUTE_MILLIS = 60_000;
+const COARSE_MINUTES = 10;
 
 /**
  * The minute of a night at which the lowest of the bodies stands highest above the local horizon in a dark enough
  * sky, or null where no minute will do. Bright twilight is tried when darkness offers nothing.
  */
 export function bestLook(sky: SkyOverSite, bodies: readonly SkyPlanet[], night: Night): BestLook | null {
-  const darkDeg = bodies.some((body) => FAINT.includes(body))
-    ? TWILIGHT_ALTITUDE_DEG.nautical
-    : TWILIGHT_ALTITUDE_DEG.civil;
-  const dark = highestMinute(sky, bodies, night, darkDeg);
+  const dark = highestMinute(sky, bodies, darkHours(sky.site, night, bodies));
   if (dark !== null) return describe(sky, bodies, dark, false);
-  if (darkDeg !== TWILIGHT_ALTITUDE_DEG.civil) return null;
-  const bright = highestMinute(sky, bodies, night, SUN_RISE_ALTITUDE_DEG);
+  if (needDarkSky(bodies)) return null;
+  const bright = highestMinute(sky, bodies, safeHours(sky.site, night));
   return bright === null ? null : describe(sky, bodies, bright, true);
+}
+
+interface Moment {
+  readonly tt: TtDays;
+  readonly clearanceDeg: number;
 }
 
 function highestMinute(
   sky: SkyOverSite,
   bodies: readonly SkyPlanet[],
-  night: Night,
-  darkDeg: number,
+  hours: readonly Stretch[],
 ): TtDays | null {
-  const { from, to } = safeHours(night);
-  const height = (tt: TtDays): number =>
-    sky.horizontal('sun', tt).altitudeDeg < darkDeg ? clearanceDeg(sky, bodies, tt) : -Infinity;
-  const start = wholeMinute(from);
-  const coarse = highest(height, start, to, COARSE_STEP_DAYS);
-  if (coarse === null) return null;
-  const around = ttDays(Math.max(start, coarse - COARSE_STEP_DAYS));
-  return highest(height, around, ttDays(Math.min(to, coarse + COARSE_STEP_DAYS)), MINUTE_DAYS);
+  const moments = hours.flatMap((stretch): Moment[] => {
+    const { start, minutes } = wholeMinutes(stretch);
+    const at = (minute: number): Moment => {
+      const tt = ttDays(start + minute * MINUTE_DAYS);
+      return { tt, clearanceDeg: clearanceDeg(sky, bodies, tt) };
+    };
+    const coarse = highest(at, 0, minutes, COARSE_MINUTES);
+    if (coarse === null) return [];
+    const near = Math.round((coarse.tt - start) / MINUTE_DAYS);
+    const fine = highest(at, Math.max(0, near - COARSE_MINUTES), Math.min(minutes, near + COARSE_MINUTES), 1);
+    return fine === null ? [] : [fine];
+  });
+  return higher(moments)?.tt ?? null;
 }
 
-/** From a little after sunset to a little before sunrise; where the Sun does neither, the whole night. */
-function safeHours({ from, to, sunset, sunrise }: Night): { from: TtDays; to: TtDays } {
-  return {
-    from: sunset === null ? from : ttDays(sunset + AFTER_SUNSET_DAYS),
-    to: sunrise === null ? to : ttDays(sunrise - BEFORE_SUNRISE_DAYS),
-  };
+/** The whole minutes of UTC in a stretch, since people are told minutes: the first, and how many follow it. */
+function wholeMinutes({ from, to }: Stretch): { start: TtDays; minutes: number } {
+  const start = ttFromUtc(utcMillis(Math.ceil(utcFromTt(from) / MINUTE_MILLIS) * MINUTE_MILLIS));
+  return { start, minutes: Math.floor((to - start) / MINUTE_DAYS) };
 }
 
-/** The next whole minute of UTC: people are told minutes. */
-const wholeMinute = (tt: TtDays): TtDays => ttFromUtc(utcMillis(Math.ceil(utcFromTt(tt) / 60_000) * 60_000));
-
-function highest(height: (tt: TtDays) => number, from: TtDays, to: TtDays, step: number): TtDays | null {
-  let best: TtDays | null = null;
-  let bestHeight = -Infinity;
-  const count = Math.floor((to - from) / step + 1e-6);
-  for (let i = 0; i <= count; i++) {
-    const tt = ttDays(from + i * step);
-    const here = height(tt);
-    if (here > bestHeight) [best, bestHeight] = [tt, here];
-  }
-  return best;
+/** Both ends are tried: at dusk and at dawn a body is often at its best. */
+function highest(at: (minute: number) => Moment, from: number, to: number, step: number): Moment | null {
+  const moments: Moment[] = [];
+  for (let minute = from; minute < to; minute += step) moments.push(at(minute));
+  if (to >= from) moments.push(at(to));
+  return higher(moments);
 }
 
-/** How far the lowest of the bodies clears the local horizon, degrees; −∞ where one of them is too low to show. */
+/** The earliest of the highest; null where none shows. */
+const higher = (moments: readonly Moment[]): Moment | null =>
+  moments.reduce<Moment | null>(
+    (best, moment) => (moment.clearanceDeg > (best?.clearanceDeg ?? -Infinity) ? moment : best),
+    null,
+  );
+
+/** How far the lowest of the bodies clears the local horizon, degrees; −∞ where one of them does not show. */
 function clearanceDeg(sky: SkyOverSite, bodies: readonly SkyPlanet[], tt: TtDays): number {
+  const sunAltitudeDeg = sky.horizontal('sun', tt).altitudeDeg;
   return Math.min(
     ...bodies.map((body) => {
       const { altitudeDeg, azimuthDeg } = sky.horizontal(body, tt);
+      if (altitudeDeg - sunAltitudeDeg < (ARCUS_VISIONIS_DEG[body] ?? 0)) return -Infinity;
       const refracted = altitudeDeg + refractionDeg(altitudeDeg);
       const clearance = refracted - Math.max(0, horizonAltitudeDeg(sky.site, azimuthDeg));
       return refracted >= LOWEST_LOOK_DEG && clearance > 0 ? clearance : -Infinity;
@@ -112,7 +128,7 @@ function describe(
     .map((body) => sky.horizontal(body, tt))
     .sort((a, b) => a.altitudeDeg - b.altitudeDeg);
   const { altitudeDeg, azimuthDeg } = lowest!;
-  const utc = utcMillis(Math.round(utcFromTt(tt) / 60_000) * 60_000);
+  const utc = utcMillis(Math.round(utcFromTt(tt) / MINUTE_MILLIS) * MINUTE_MILLIS);
   return {
     utc,
     localTime: localIso(utc, sky.site.zone),

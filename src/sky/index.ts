@@ -7,18 +7,13 @@ export { localViewer } from './local-view.js';
 export type { BodyFromSite, LocalView } from './local-view.js';
 export { brightPlanetsByMeridian } from './meridian.js';
 export type { MeridianPlanet } from './meridian.js';
-export { TWILIGHT_ALTITUDE_DEG, eveningOf, nightOf } from './night.js';
-export type { Night } from './night.js';
+export { TWILIGHT_ALTITUDE_DEG, eveningOf, nightOf, twilightsOf } from './night.js';
+export type { Night, Twilight } from './night.js';
 export { fromJ2000, toJ2000 } from './precession.js';
 export type { EquatorOfDate, EquatorialPlace } from './precession.js';
 export { refractionDeg } from './refraction.js';
-export {
-  PLANET_RISE_ALTITUDE_DEG,
-  SUN_RISE_ALTITUDE_DEG,
-  altitudeCrossings,
-  meridianTransits,
-} from './rise-set.js';
-export type { Crossing } from './rise-set.js';
+export { PLANET_RISE_ALTITUDE_DEG, SUN_RISE_ALTITUDE_DEG, dayArc, meridianTransits } from './rise-set.js';
+export type { Crossing, DayArc } from './rise-set.js';
 export {
   SIDEREAL_TURNS_PER_DAY,
   greenwichApparentSidereal,
@@ -28,3 +23,4 @@ export {
 } from './sidereal.js';
 export { SiteError, horizonAltitudeDeg, makeSite } from './site.js';
 export type { HorizonPoint, Site, SiteWords } from './site.js';
+export type { Stretch } from './stretch.js';

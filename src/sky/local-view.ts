@@ -5,15 +5,11 @@ import type { LocalDate, TtDays, UtcMillis } from '../time/index.js';
 import { bestLook } from './best-look.js';
 import type { BestLook } from './best-look.js';
 import { SkyOverSite } from './horizontal.js';
+import { sunGoneAltitudeDeg } from './looking-hours.js';
 import { eveningOf, nightOf } from './night.js';
 import type { Night } from './night.js';
 import { refractionDeg } from './refraction.js';
-import {
-  PLANET_RISE_ALTITUDE_DEG,
-  SUN_RISE_ALTITUDE_DEG,
-  altitudeCrossings,
-  meridianTransits,
-} from './rise-set.js';
+import { PLANET_RISE_ALTITUDE_DEG, dayArc } from './rise-set.js';
 import { separationDeg } from './separation.js';
 import { horizonAltitudeDeg } from './site.js';
 import type { Site } from './site.js';
@@ -48,11 +44,14 @@ export interface BodyFromSite {
   /** From north through east. */
   readonly azimuthDeg: number;
   readonly aboveHorizon: boolean;
-  /** The rise, upper transit and set of that local night (noon to noon); null where it does not happen. */
+  /** The first rise, upper transit and set in that local night (noon to noon); null where it does not happen. */
   readonly rise: UtcMillis | null;
   readonly transit: UtcMillis | null;
   readonly set: UtcMillis | null;
 }
+
+/** Events come by and large in the order of time, so a few nights are enough to be shared. */
+const KEPT_NIGHTS = 64;
 
 /** Makes the views of one site: events of one night share its sunset and sunrise. */
 export function localViewer(
@@ -65,6 +64,7 @@ export function localViewer(
     const utc = utcFromTt(tt);
     const evening = eveningOf(utc, site.zone);
     const night = nights.get(evening) ?? nightOf(sky, evening);
+    if (nights.size >= KEPT_NIGHTS) nights.clear();
     nights.set(evening, night);
     const sunAltitudeDeg = sky.horizontal('sun', tt).altitudeDeg;
     const fromSite = bodies.map((body) => bodyFromSite(sky, body, tt, night));
@@ -75,7 +75,7 @@ export function localViewer(
       zone: site.zone,
       sunAltitudeDeg,
       visibleAtInstant:
-        sunAltitudeDeg < SUN_RISE_ALTITUDE_DEG && fromSite.every(({ aboveHorizon }) => aboveHorizon),
+        sunAltitudeDeg < sunGoneAltitudeDeg(site) && fromSite.every(({ aboveHorizon }) => aboveHorizon),
       bodies: fromSite,
       topocentricSeparationDeg: separationDeg(sky, bodies, tt),
       evening,
@@ -88,7 +88,8 @@ export function localViewer(
 function bodyFromSite(sky: SkyOverSite, body: SkyPlanet, tt: TtDays, { from, to }: Night): BodyFromSite {
   const { altitudeDeg, azimuthDeg } = sky.horizontal(body, tt);
   const refracted = altitudeDeg + refractionDeg(altitudeDeg);
-  const crossings = altitudeCrossings(sky, body, from, to, PLANET_RISE_ALTITUDE_DEG);
+  const arc = dayArc(sky, body, from, to);
+  const crossings = arc.crossings(PLANET_RISE_ALTITUDE_DEG);
   const utcOf = (at: TtDays | undefined): UtcMillis | null => (at === undefined ? null : utcFromTt(at));
   return {
     body,
@@ -96,7 +97,7 @@ function bodyFromSite(sky: SkyOverSite, body: SkyPlanet, tt: TtDays, { from, to 
     azimuthDeg,
     aboveHorizon: refracted > Math.max(0, horizonAltitudeDeg(sky.site, azimuthDeg)),
     rise: utcOf(crossings.find(({ is }) => is === 'rise')?.tt),
-    transit: utcOf(meridianTransits(sky, body, from, to, 'upper')[0]),
+    transit: utcOf(arc.transits[0]),
     set: utcOf(crossings.find(({ is }) => is === 'set')?.tt),
   };
 }
