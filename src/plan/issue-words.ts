@@ -20,19 +20,21 @@ export function valueAt(value: unknown, path: Path): unknown {
   }, value);
 }
 
+/** A message of the schema that begins so says what would be right; what is wrong is told here. */
+const REMEDY = 'write ';
+
 /** What is wrong with a field and what would be right, in words for its writer. */
 export function issueWords(issue: Issue, root: unknown): string {
   const value = valueAt(root, issue.path as Path);
+  const ownRemedy = issue.message.startsWith(REMEDY) ? issue.message : null;
   switch (issue.code) {
     case 'invalid_type':
-      return value === undefined
-        ? `is missing: write ${kindOfValue[issue.expected] ?? issue.expected}`
-        : `is ${described(value)}: write ${kindOfValue[issue.expected] ?? issue.expected}`;
+      return `is ${value === undefined ? 'missing' : described(value)}: ${ownRemedy ?? `${REMEDY}${kindOfValue[issue.expected] ?? issue.expected}`}`;
     case 'invalid_value':
       return notOneOf(value, issue.values.map(String));
     case 'too_small':
     case 'too_big':
-      return outOfRange(issue, value);
+      return outOfRange(issue, value, ownRemedy);
     case 'custom':
       return issue.message;
     case 'invalid_format':
@@ -60,7 +62,8 @@ const kindOfValue: Readonly<Partial<Record<string, string>>> = {
 function described(value: unknown): string {
   if (value === null) return 'empty';
   if (Array.isArray(value)) return 'a list';
-  if (typeof value === 'number') return `a number (${value})`;
+  if (typeof value === 'number')
+    return Number.isFinite(value) ? `a number (${value})` : `no plain number (${value})`;
   if (typeof value === 'string') return `a text (${quoted(value)})`;
   if (typeof value === 'boolean') return `${value}, neither text nor number`;
   return 'a group of fields';
@@ -72,19 +75,23 @@ function notOneOf(value: unknown, names: readonly string[]): string {
   return `${quoted(value)} is not known.${oneOf(value, names)}`;
 }
 
-function outOfRange(issue: Extract<Issue, { code: 'too_small' | 'too_big' }>, value: unknown): string {
+function outOfRange(
+  issue: Extract<Issue, { code: 'too_small' | 'too_big' }>,
+  value: unknown,
+  ownRemedy: string | null,
+): string {
   const isLeast = issue.code === 'too_small';
   const bound = isLeast ? issue.minimum : issue.maximum;
   if (issue.origin === 'number') {
-    const most =
-      issue.inclusive === false ? (isLeast ? 'more than' : 'less than') : isLeast ? 'at least' : 'at most';
+    const strictly = issue.inclusive === false;
+    const most = isLeast ? (strictly ? 'more than' : 'at least') : strictly ? 'less than' : 'at most';
     return `${String(value)} is out of range: write ${most} ${bound}`;
   }
-  const count = Array.isArray(value) || typeof value === 'string' ? value.length : 0;
-  const things = issue.origin === 'string' ? 'characters' : 'entries';
   if (issue.origin === 'string' && isLeast) return 'is empty: write a text';
-  if (issue.origin === 'array' && count === 0)
-    return 'is an empty list: write at least one entry, or leave the field out';
+  const count = Array.isArray(value) || typeof value === 'string' ? value.length : 0;
+  if (count === 0)
+    return `is an empty list: ${ownRemedy ?? 'write at least one entry, or leave the field out'}`;
+  const things = issue.origin === 'string' ? 'characters' : count === 1 ? 'entry' : 'entries';
   const wanted = issue.exact === true ? 'exactly' : isLeast ? 'at least' : 'at most';
-  return `has ${count} ${things}: write ${wanted} ${bound}`;
+  return `has ${count} ${things}: ${ownRemedy ?? `write ${wanted} ${bound}`}`;
 }

@@ -28,8 +28,10 @@ const problemIn = <T>(reading: Reading<T>): string | null => ('problem' in readi
 const text = (most: number) => z.string().trim().min(1).max(most);
 
 /** Spans are read again with their zone once the home site is known; here only the form counts. */
-const instant = checked(z.string(), (word) => problemIn(readInstant(word, null)));
-const date = checked(z.string(), (word) => {
+const instant = checked(z.string('write a date like 2027-01-31'), (word) =>
+  problemIn(readInstant(word, null)),
+);
+const date = checked(z.string('write a date like 2027-01-31'), (word) => {
   if (parseLocalDate(word) === null) return `${quoted(word)} is not a date of the calendar: write YYYY-MM-DD`;
   return problemIn(readInstant(word, null));
 });
@@ -51,7 +53,7 @@ const siteId = checked(z.string().max(40), (word) =>
 );
 
 const horizonPoint = z
-  .tuple([z.number().min(0).max(360), z.number().min(-10).max(90)])
+  .tuple([z.number().min(0).max(360), z.number().min(-10).max(90)], 'write two numbers, [azimuth, altitude]')
   .meta({ description: 'Azimuth (degrees from north through east) and the altitude of the horizon there.' });
 
 const site = z
@@ -106,7 +108,8 @@ export const planSchema = z
           description: 'The evenings of the week on which the public may come.',
         }),
       })
-      .optional(),
+      .optional()
+      .meta({ description: 'When the home site may open to the public.' }),
     forecast: z
       .strictObject({
         kinds: z.array(z.enum(kindNames)).min(1).optional().meta({ description: 'All by default.' }),
@@ -126,7 +129,7 @@ export const planSchema = z
     residuals: z
       .strictObject({
         pairs: z
-          .array(z.tuple([z.enum(bodies), z.enum(bodies)]))
+          .array(z.tuple([z.enum(bodies), z.enum(bodies)], 'write two bodies, like [earth, mars]'))
           .min(1)
           .max(36),
         span: span.optional().meta({ description: 'The span of the plan by default; decades tell more.' }),
