@@ -20,7 +20,8 @@ export interface OrbitalMotion {
  *
  * Error in heliocentric longitude, the worst against VSOP87: Table 1 within 1800–2050 30″ (Mercury, Venus, Earth), 100″
  * (Mars), 510″ (Jupiter), 740″ (Saturn), 120″ (Uranus), 60″ (Neptune); Table 2 within 1600–2600 25″ (Mercury) … 1260″
- * (Saturn). The nominal errors that Standish prints are half of that and less.
+ * (Saturn). The nominal errors that Standish prints (Table 1: 15″ Mercury … 600″ Saturn) lie between the root mean square
+ * and the worst, save for Neptune's 10″.
  * Velocity and acceleration are those of the two-body orbit of the instant, its mean motion that of the mean longitude;
  * the drift of the other elements is left out, which is 1e-4 of the velocity at most (Pluto 2e-4).
  * Source: Standish, as in `elements.ts`.

@@ -32,8 +32,9 @@ export function stretchOf({ epoch, periodDays }: MeanCycle, n: number): { from: 
   return { from: edge(n), to: edge(n + 1) };
 }
 
-/** The numbers of all cycles whose stretch has a part in [from, to). */
+/** The numbers of all cycles whose stretch has a part in [from, to), rising; none for an empty span. */
 export function cyclesOverlapping(cycle: MeanCycle, from: TtDays, to: TtDays): number[] {
+  if (to <= from) return [];
   const first = cycleNumberAt(cycle, from) - 1;
   const count = Math.ceil((to - from) / cycle.periodDays) + 4;
   return Array.from({ length: count }, (_, i) => first + i).filter((n) => {

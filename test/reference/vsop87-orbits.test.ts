@@ -26,9 +26,10 @@ import type { TtDays } from '../../src/time/index.js';
  * Judges: Bretagnon & Francou, VSOP87 (1988): the check values of vsop87.chk, version D (ecliptic and equinox of date),
  * and one of version B (J2000); and the full series of version B as carried by the npm package astronomia 4.2.0.
  *
- * What an ellipse can do is the tolerance. Standish prints nominal errors (λ 15″ Mercury … 600″ Saturn for Table 1);
- * they are near the root mean square, and the worst is up to six times that (Neptune, because a heliocentric ellipse
- * cannot follow the Sun about the barycentre). The ceilings below stand 5–10 % above the worst of 301 dates.
+ * What an ellipse can do is the tolerance. The nominal errors that Standish prints (Table 1 in longitude: Mercury 15″,
+ * Venus 20″, Earth 20″, Mars 40″, Jupiter 400″, Saturn 600″, Uranus 50″, Neptune 10″) lie between the root mean square
+ * and the worst, save for Neptune's: root mean square 29″, worst 60″, since no heliocentric ellipse can follow the Sun
+ * around the barycentre. The ceilings below stand 5–10 % above the worst of 301 dates.
  */
 interface Ceiling {
   readonly longitudeArcsec: number;

@@ -47,6 +47,25 @@ describe('near-repeats', () => {
     expect(nearRepeats(18, 12)).toEqual([{ cycles: 2, years: 3, misfitDays: 0, misfitDeg: 0 }]);
   });
 
+  it.each([
+    ['venus', [8, 243, 251]],
+    ['mars', [15, 32, 47, 79, 205]],
+    ['jupiter', [12, 83]],
+    ['uranus', [1, 83, 84]],
+  ] as const)('of %s in 300 calendar years come after %j, and no farther off than 20°', (planet, years) => {
+    const repeats = nearRepeats(synodicPeriodOf(planet, 'earth'), CALENDAR_YEAR_DAYS);
+    expect(yearsOf(repeats)).toEqual(years);
+    for (const { misfitDeg } of repeats) expect(Math.abs(misfitDeg)).toBeLessThan(20);
+  });
+
+  it.each([
+    [() => nearRepeats(0, 365), /a period of 0 days is not a turn/],
+    [() => nearRepeats(780, NaN), /a period of NaN days is not a turn/],
+  ])('refuse what is no period %#', (ask, message) => {
+    expect(ask).toThrow(PeriodError);
+    expect(ask).toThrow(message);
+  });
+
   it('stops at the limit asked for', () => {
     const mars = synodicPeriodOf('mars', 'earth');
     expect(yearsOf(nearRepeats(mars, CALENDAR_YEAR_DAYS, 40))).toEqual([15, 32]);
