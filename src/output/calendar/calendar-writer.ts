@@ -84,7 +84,7 @@ class EntryWithRawLines extends ICalEvent {
         stamp: utc(stamp),
         summary: oneLine(entry.summary),
         description: cleaned(entry.description),
-        categories: entry.categories.map((name) => ({ name: oneLine(name) })),
+        categories: entry.categories.filter((name) => name !== '').map((name) => ({ name: oneLine(name) })),
         status: statuses[entry.status],
         transparency: ICalEventTransparency.TRANSPARENT,
         ...(entry.place === null ? {} : { location: oneLine(entry.place.name) }),
