@@ -77,10 +77,11 @@ export interface BodyCircumstances {
   readonly elongationDeg: number;
   /** East of the Sun: the evening sky; west: the morning sky. */
   readonly elongationSide: 'east' | 'west';
+  /** Sun–planet–Earth along the light, without aberration. */
   readonly phaseAngleDeg: number;
   /** 0 … 1. */
   readonly illuminatedFraction: number;
-  /** Visual magnitude, Mallama & Hilton (2018); null where the formula does not reach. */
+  /** Visual, Mallama & Hilton (2018), Mars averaged over its rotation (−0.06 to +0.05); null where they do not reach. */
   readonly magnitude: number | null;
   /** Apparent equatorial diameter. */
   readonly diameterArcsec: number;
@@ -88,6 +89,7 @@ export interface BodyCircumstances {
   readonly ringTiltDeg?: number;
   /** IAU constellation, Latin nominative. */
   readonly constellation: string;
+  /** Astrometric: light-time only, no aberration, axes of J2000.0; what star catalogues compare with. */
   readonly rightAscensionJ2000Hours: number;
   readonly declinationJ2000Deg: number;
   readonly rightAscensionOfDateHours: number;
@@ -132,7 +134,7 @@ export interface HeliocentricCircumstances {
 
 export interface HeliocentricPlace {
   readonly body: Planet;
-  /** Geometric, mean ecliptic and equinox of date. */
+  /** Geometric, true ecliptic and equinox of date. */
   readonly heliocentricLongitudeDeg: number;
   readonly heliocentricLatitudeDeg: number;
   readonly heliocentricDistanceAu: number;

@@ -6,7 +6,7 @@ import { Figure } from './figure.js';
 const SIZE = 300;
 const RADIUS = 132;
 const CENTRE = SIZE / 2;
-const SMALLEST_DISC_PX = 3;
+const SMALLEST_DISC_PX = 4;
 /** Fields that people look through: a telescope's at high and low power, large and small binoculars. */
 const FIELDS_DEG = [0.5, 1, 2.5, 4, 6.5] as const;
 /** Round lengths for the scale bar, arcminutes. */
@@ -45,7 +45,7 @@ export function CloseUp({ id, pair, title, finding, tableId }: CloseUpProps) {
       width={SIZE}
       height={SIZE + 34}
       tableId={tableId}
-      legend={`The circle is a field of ${angleWords(fieldDeg)}.`}
+      legend={`${finding} The circle is a field of ${angleWords(fieldDeg)}.`}
     >
       <circle cx={CENTRE} cy={CENTRE} r={RADIUS} class="field" />
       <text x={CENTRE} y={14} class="middle">

@@ -5,9 +5,9 @@ import { COLUMN_WIDTH, Figure } from './figure.js';
 import { TimeAxis, timeTicks } from './time-axis.js';
 
 const LEFT = 52;
-const TOP = 26;
+const TOP = 46;
 const PANEL = 92;
-const GAP = 22;
+const GAP = 30;
 const HEIGHT = TOP + 2 * PANEL + GAP + 12;
 
 interface OcStemsProps {
@@ -100,7 +100,7 @@ function Panel({ rows, x, top, unit, label, valueOf, ringed, className }: PanelP
       <text x={LEFT - 6} y={y(-largest) + 3} class="end">
         {fixed(-largest, digits)}
       </text>
-      <text x={LEFT + 6} y={top + PANEL - 2} class="quiet">
+      <text x={LEFT + 6} y={top - 4} class="quiet">
         refined − {label}, {unit}
       </text>
       {rows.map((row) => {

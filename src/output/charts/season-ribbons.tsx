@@ -121,7 +121,8 @@ function Ribbon({ season: { body, samples }, x, middle, events }: RibbonProps) {
         .filter(({ bodies }) => bodies.length === 1 && bodies[0] === body)
         .map((event) => {
           const notch = notches[event.kind];
-          return notch === undefined ? null : (
+          // Mercury's stations come every two months and would bury its elongations.
+          return notch === undefined || (notch === 'tick' && body === 'mercury') ? null : (
             <NotchMark key={event.id} notch={notch} x={x(event.utc)} y={middle} />
           );
         })}

@@ -28,6 +28,9 @@ export function timeTicks(from: UtcMillis, to: UtcMillis): Tick[] {
     .filter(({ utc }) => utc >= from && utc <= to);
 }
 
+/** A label needs this much to its right, px. */
+const LABEL_ROOM = 44;
+
 interface TimeAxisProps {
   readonly ticks: readonly Tick[];
   readonly x: TimeScale;
@@ -37,14 +40,17 @@ interface TimeAxisProps {
 
 /** Month lines through a picture, with their names along the top. */
 export function TimeAxis({ ticks, x, top, bottom }: TimeAxisProps) {
+  const right = x.range()[1]!;
   return (
     <g class="axis">
       {ticks.map(({ utc, label, major }) => (
         <g key={utc}>
           <line x1={x(utc)} x2={x(utc)} y1={top} y2={bottom} class={major ? 'rule strong' : 'rule'} />
-          <text x={x(utc) + 4} y={top + 10}>
-            {label}
-          </text>
+          {x(utc) > right - LABEL_ROOM ? null : (
+            <text x={x(utc) + 4} y={top + 10}>
+              {label}
+            </text>
+          )}
         </g>
       ))}
     </g>

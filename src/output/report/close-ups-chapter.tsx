@@ -1,4 +1,5 @@
 import type { PairCircumstances } from '../../forecast/index.js';
+import { localDateTime } from '../../time/index.js';
 import { CloseUp } from '../charts/index.js';
 import { bodiesWords } from '../event-words.js';
 import { headlineOf } from '../headline.js';
@@ -20,7 +21,7 @@ export function CloseUpsChapter(input: ReportInput) {
           key={meeting.id}
           id={`close-up-${event.id.replaceAll(/[^a-z0-9]+/g, '-')}`}
           pair={pairOf({ meeting, event })}
-          title={`${bodiesWords(event)}, ${angleWords(meeting.leastSeparationDeg)} apart`}
+          title={`${bodiesWords(event)}, ${angleWords(meeting.leastSeparationDeg)} apart, ${localDateTime(event.utc, zone).toFormat('d LLLL yyyy')}`}
           finding={headlineOf(event, zone)}
           tableId="events-table"
         />

@@ -1,8 +1,8 @@
 import type { ForecastEvent } from '../../forecast/index.js';
 import type { Site } from '../../sky/index.js';
-import { isoUtc, localDateTime } from '../../time/index.js';
+import { isoUtc, localDateTime, zoneAbbreviation } from '../../time/index.js';
 import { bodiesWords, circumstancesLine, kindTitles, seriesWords } from '../event-words.js';
-import { dateAndClock, tellInstant, uncertaintyShort } from '../uncertainty-words.js';
+import { tellInstant, uncertaintyShort } from '../uncertainty-words.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
 import { Table } from './table.js';
@@ -55,21 +55,27 @@ function byMonth(events: readonly ForecastEvent[], zone: string): [string, Forec
 
 function columnsFor(zone: string, sites: readonly Site[]): Column<ForecastEvent>[] {
   return [
-    {
-      title: 'When',
-      class: 'when',
-      cell: (event) => <time dateTime={isoUtc(event.utc)}>{dateAndClock(event, zone)}</time>,
-    },
-    {
-      title: 'How sure',
-      class: 'sure',
-      cell: ({ uncertaintySeconds }) => uncertaintyShort(uncertaintySeconds.utc),
-    },
-    { title: 'What', cell: (event) => <What event={event} /> },
+    { title: 'When, how sure', class: 'when', cell: (event) => <When event={event} zone={zone} /> },
+    { title: 'What', class: 'what', cell: (event) => <What event={event} /> },
     ...(sites.length === 0
       ? []
       : [{ title: 'From here', cell: (event: ForecastEvent) => <FromSites event={event} sites={sites} /> }]),
   ];
+}
+
+function When({ event, zone }: { event: ForecastEvent; zone: string }) {
+  const { utc, uncertaintySeconds } = event;
+  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
+  return (
+    <>
+      <time dateTime={isoUtc(utc)}>
+        {isoDate} {weekday}
+      </time>
+      <br />
+      {time === '' ? '' : `${time} ${zoneAbbreviation(utc, zone)} `}
+      <span class="place">{uncertaintyShort(uncertaintySeconds.utc)}</span>
+    </>
+  );
 }
 
 function What({ event }: { event: ForecastEvent }) {
@@ -85,20 +91,26 @@ function What({ event }: { event: ForecastEvent }) {
   );
 }
 
-/** The home site in full, the partners in a line each. */
+/** The home site in full; the partners that see it in a line each, those that do not in one together. */
 function FromSites({ event, sites }: { event: ForecastEvent; sites: readonly Site[] }) {
+  const [home, ...partners] = event.local.map((view, i) => ({ view, name: sites[i]!.name }));
+  const blind = partners.filter(({ view }) => view.bestLook === null);
   return (
     <ul>
-      {event.local.map((view, i) => (
-        <li key={view.site}>
-          {i === 0 ? null : (
+      <li>{home?.view.verdict}</li>
+      {partners
+        .filter(({ view }) => view.bestLook !== null)
+        .map(({ view, name }) => (
+          <li key={view.site}>
             <span class="place">
-              {sites[i]!.name}, {clockAt(event, view.zone)}:{' '}
-            </span>
-          )}
-          {view.verdict}
-        </li>
-      ))}
+              {name}, {clockAt(event, view.zone)}:
+            </span>{' '}
+            {view.verdict}
+          </li>
+        ))}
+      {blind.length === 0 || home?.view.bestLook === null ? null : (
+        <li class="place">Not visible from {blind.map(({ name }) => name).join(' or ')}.</li>
+      )}
     </ul>
   );
 }

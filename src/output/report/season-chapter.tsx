@@ -39,7 +39,7 @@ export function SeasonChapter(input: ReportInput) {
       <SeasonRibbons
         seasons={seasons}
         forecast={forecast}
-        title={`When each planet is at its best, ${where}`}
+        title={titleFor(bests, zone)}
         finding={finding}
         tableId="season-table"
       />
@@ -48,7 +48,10 @@ export function SeasonChapter(input: ReportInput) {
         caption={`The longest nights with each planet, ${where}`}
         columns={[
           { title: 'Planet', cell: ({ body }) => titleOf(body) },
-          { title: 'At its best', cell: ({ from, to }) => `${day(from)} to ${day(to)}` },
+          {
+            title: 'At its best',
+            cell: ({ from, to }) => (from === to ? `around ${day(from)}` : `${day(from)} to ${day(to)}`),
+          },
           { title: 'Then', cell: ({ peak }) => stateWords[peak.state] },
           {
             title: sites[0] === undefined ? 'From the Sun' : 'Dark hours a night',
@@ -64,6 +67,22 @@ export function SeasonChapter(input: ReportInput) {
       />
     </>
   );
+}
+
+/** The bright planets that have a season, in its order: the finding of the picture. */
+const LEADING: readonly Season['body'][] = ['venus', 'mars', 'jupiter', 'saturn'];
+
+function titleFor(bests: readonly Best[], zone: string): string {
+  const leading = bests
+    .filter(({ body }) => LEADING.includes(body))
+    .sort((a, b) => a.peak.utc - b.peak.utc)
+    .map(({ body, peak }) => ({
+      name: titleOf(body),
+      month: localDateTime(peak.utc, zone).toFormat('LLLL yyyy'),
+    }));
+  if (leading.length === 0) return 'The season of each planet';
+  const [first, ...rest] = leading.map(({ name, month }) => `${name} around ${month}`);
+  return ['At its best: ' + first!, ...rest].join(', ');
 }
 
 /** The longest-lasting stretch around the night in which a planet can be shown for longest; none where it never can. */

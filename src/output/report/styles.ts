@@ -44,21 +44,22 @@ svg .quiet,.axis text{fill:var(--quiet)}
 .stems circle{fill:var(--ink)}
 .stems.kepler .stem{stroke:var(--dawn)}
 .stems.kepler circle{fill:var(--dawn)}
-.stems .ring{fill:none;stroke:var(--meet);stroke-width:1.5}
+.stems circle.ring{fill:none;stroke:var(--meet);stroke-width:1.5}
 .zero{stroke:var(--ink);stroke-width:1}
 .field{fill:none;stroke:var(--rule);stroke-width:1.5}
 .disc{fill:var(--ink)}
 .drift path,.scale line{fill:none;stroke:var(--quiet);stroke-width:1.4}
 .closeups{display:grid;grid-template-columns:repeat(auto-fill,minmax(18.8rem,1fr));gap:0 1.5rem}
 .headlines{list-style:none;padding:0;margin:0}
-.headlines li{display:grid;grid-template-columns:6.5rem 1fr;gap:0 1rem;padding:.8rem 0;border-bottom:1px solid var(--rule)}
-.headlines time{color:var(--quiet)}
+.headlines li{display:grid;grid-template-columns:7.2rem 1fr;gap:0 1rem;padding:.8rem 0;border-bottom:1px solid var(--rule)}
+.headlines time{color:var(--quiet);white-space:nowrap}
 .headlines p{margin:0}
 table{border-collapse:collapse;width:100%;font-size:.875rem;line-height:1.4}
 caption{text-align:left;font-weight:600;padding:.4rem 0}
 th,td{text-align:left;vertical-align:top;padding:.4rem .7rem .4rem 0;border-bottom:1px solid var(--rule)}
 thead th{color:var(--quiet);font-weight:600}
-td.when,td.sure{white-space:nowrap}
+td.when{white-space:nowrap;width:9.5rem}
+td.what{width:15rem}
 td.number,th.number{text-align:right}
 td ul{list-style:none;margin:0;padding:0}
 td li+li{margin-top:.25rem}
@@ -78,8 +79,10 @@ dd{margin-bottom:.5rem}
 table.stack,table.stack tbody,table.stack tr,table.stack td,table.stack th{display:block}
 table.stack thead{position:absolute;left:-999rem}
 table.stack tr{padding:.6rem 0;border-bottom:1px solid var(--rule)}
+table.stack caption{display:block}
 table.stack td,table.stack th{border:0;padding:.1rem 0}
 table.stack td.number{text-align:left}
+td.when,td.what{width:auto}
 table.stack td[data-label]::before{content:attr(data-label) ": ";color:var(--quiet)}
 }
 @media print{
@@ -90,6 +93,7 @@ body{max-width:none;padding:0}
 nav,.skip,.note a{display:none}
 .scroll{overflow:visible}
 .picture svg{max-width:100%;height:auto}
+table{font-size:8.5pt}
 .picture,.headlines li,tr{break-inside:avoid}
 h2,h3,caption{break-after:avoid}
 h2.sheet{break-before:page}
