@@ -2,8 +2,9 @@ import type { SkyPlanet } from '../bodies/index.js';
 import { localIso, ttDays, ttFromUtc, utcFromTt, utcMillis } from '../time/index.js';
 import type { TtDays, UtcMillis } from '../time/index.js';
 import { compassWords } from './compass.js';
+import { darknessNeeded, outshineTwilight } from './darkness-needed.js';
 import type { SkyOverSite } from './horizontal.js';
-import { darkHours, needDarkSky, safeHours } from './looking-hours.js';
+import { darkHours, safeHours } from './looking-hours.js';
 import type { Night } from './night.js';
 import { refractionDeg } from './refraction.js';
 import { separationDeg } from './separation.js';
@@ -29,31 +30,18 @@ export interface BestLook {
 /** Lower than this, murk and turbulence spoil the view; common practice. */
 export const LOWEST_LOOK_DEG = 5;
 
-/**
- * How far below a body the Sun must be, in altitude, for the naked eye to pick the body out of the twilight: the
- * arcus visionis, the largest for each planet. Fainter bodies wait for a dark sky anyway.
- * Source: C. Schoch, in Langdon & Fotheringham, The Venus Tablets of Ammizaduga (1928).
- */
-const ARCUS_VISIONIS_DEG: Readonly<Partial<Record<SkyPlanet, number>>> = {
-  mercury: 13,
-  venus: 6,
-  mars: 14.5,
-  jupiter: 9.3,
-  saturn: 13,
-};
-
 const MINUTE_DAYS = 1 / 1440;
 const MINUTE_MILLIS = 60_000;
 const COARSE_MINUTES = 10;
 
 /**
  * The minute of a night at which the lowest of the bodies stands highest above the local horizon in a dark enough
- * sky, or null where no minute will do. Bright twilight is tried when darkness offers nothing.
+ * sky, or null where no minute will do. Bright twilight is tried when darkness offers nothing to bodies that outshine it.
  */
 export function bestLook(sky: SkyOverSite, bodies: readonly SkyPlanet[], night: Night): BestLook | null {
   const dark = highestMinute(sky, bodies, darkHours(sky.site, night, bodies));
   if (dark !== null) return describe(sky, bodies, dark, false);
-  if (needDarkSky(bodies)) return null;
+  if (!outshineTwilight(bodies)) return null;
   const bright = highestMinute(sky, bodies, safeHours(sky.site, night));
   return bright === null ? null : describe(sky, bodies, bright, true);
 }
@@ -110,7 +98,7 @@ function clearanceDeg(sky: SkyOverSite, bodies: readonly SkyPlanet[], tt: TtDays
   return Math.min(
     ...bodies.map((body) => {
       const { altitudeDeg, azimuthDeg } = sky.horizontal(body, tt);
-      if (altitudeDeg - sunAltitudeDeg < (ARCUS_VISIONIS_DEG[body] ?? 0)) return -Infinity;
+      if (altitudeDeg - sunAltitudeDeg < darknessNeeded[body].arcusVisionisDeg) return -Infinity;
       const refracted = altitudeDeg + refractionDeg(altitudeDeg);
       const clearance = refracted - Math.max(0, horizonAltitudeDeg(sky.site, azimuthDeg));
       return refracted >= LOWEST_LOOK_DEG && clearance > 0 ? clearance : -Infinity;

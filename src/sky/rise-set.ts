@@ -36,8 +36,9 @@ export interface DayArc {
 
 /**
  * The arc of a body over a site in [from, to). Between two passages of the meridian the altitude only rises or only
- * falls, so every crossing, also one of minutes, has a bracket of its own. What that leaves out is a crossing and its
- * return within 10″ of a turning point that the body's own motion shifts off the meridian (2′ within 1° of a pole).
+ * falls, so every crossing, also one of minutes, has a bracket of its own. The body's own motion shifts the turning
+ * point a little off the meridian: a crossing and its return are missed where the body stays within 25″ of the
+ * threshold between them (within minutes of arc nearer than 1° to a pole).
  */
 export function dayArc(sky: SkyOverSite, body: Body, from: TtDays, to: TtDays): DayArc {
   const altitudeDeg = (tt: number): number => sky.horizontal(body, ttDays(tt)).altitudeDeg;
