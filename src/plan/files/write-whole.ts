@@ -7,19 +7,25 @@ import { basename, dirname, join } from 'node:path';
  */
 export function writeWhole(path: string, bytes: Uint8Array): void {
   const neighbour = join(dirname(path), `.${basename(path)}.${process.pid}.part`);
-  // What a killed process with our number left behind; and `wx`: never through a link that somebody put there.
-  rmSync(neighbour, { force: true });
-  const file = openSync(neighbour, 'wx', 0o644);
   try {
-    try {
-      for (let done = 0; done < bytes.length;) done += writeSync(file, bytes, done);
-      fsyncSync(file);
-    } finally {
-      closeSync(file);
-    }
+    // What a killed process with our number left behind.
+    rmSync(neighbour, { force: true });
+    writeThrough(neighbour, bytes);
     renameSync(neighbour, path);
   } catch (fault) {
     rmSync(neighbour, { force: true });
-    throw fault;
+    // A refusal speaks of the file that was asked for, not of its neighbour.
+    throw fault instanceof Error && 'path' in fault ? Object.assign(fault, { path }) : fault;
+  }
+}
+
+/** Writes a new file and waits until the disk has it. `wx`: never through a link that somebody put there. */
+function writeThrough(path: string, bytes: Uint8Array): void {
+  const file = openSync(path, 'wx', 0o644);
+  try {
+    for (let done = 0; done < bytes.length;) done += writeSync(file, bytes, done);
+    fsyncSync(file);
+  } finally {
+    closeSync(file);
   }
 }
