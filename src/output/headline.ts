@@ -1,5 +1,6 @@
 import { titleOf } from '../bodies/index.js';
 import type { ForecastEvent } from '../forecast/index.js';
+import type { BestLook } from '../sky/index.js';
 import { localDateTime, utcFromTt, utcMillis } from '../time/index.js';
 import type { UtcMillis } from '../time/index.js';
 import { bodiesWords, leastElongationDeg } from './event-words.js';
@@ -27,17 +28,23 @@ export function isObservable(event: ForecastEvent): boolean {
  * @param zone whose dates are told; the first site's by default, else UTC
  */
 export function headlineOf(event: ForecastEvent, zone = event.local[0]?.zone ?? 'UTC'): string {
-  const observable = isObservable(event);
-  const look = event.local[0]?.bestLook ?? null;
-  const sentences =
-    observable && look?.separationDeg != null
-      ? [
-          `${bodiesWords(event)} stand ${angleWords(look.separationDeg)} apart ${nightWords(look, zone)}; ${lookWords(look, zone)}.`,
-        ]
-      : [observable ? seasonSentence(event, zone) : plainSentence(event, zone), adviceOf(event, observable)];
-  return [...sentences, observable ? aidWords(event) : null]
+  return sentencesOf(event, zone)
     .filter((sentence) => sentence !== null)
     .join(' ');
+}
+
+function sentencesOf(event: ForecastEvent, zone: string): (string | null)[] {
+  const look = event.local[0]?.bestLook ?? null;
+  if (!isObservable(event)) return [plainSentence(event, zone), reasonOf(event)];
+  return look?.separationDeg == null
+    ? [seasonSentence(event, zone), event.local[0]?.verdict ?? null, aidWords(event)]
+    : [meetingSentence(event, look, look.separationDeg, zone), aidWords(event)];
+}
+
+/** Two bodies on their best evening here, as far apart as they are then. */
+function meetingSentence(event: ForecastEvent, look: BestLook, separationDeg: number, zone: string): string {
+  const pair = `${bodiesWords(event)} stand ${angleWords(separationDeg)} apart`;
+  return `${pair} ${nightWords(look, zone)}; ${lookWords(look, zone)}.`;
 }
 
 const plainSentence = (event: ForecastEvent, zone: string): string =>
@@ -76,12 +83,10 @@ function spanWords(from: UtcMillis, to: UtcMillis, zone: string): string {
   return `${firstDay} to ${last.toFormat('d LLLL yyyy')}`;
 }
 
-/** The first site's verdict; without a site, why there is nothing to see. */
-function adviceOf(event: ForecastEvent, observable: boolean): string | null {
+/** Why there is nothing to see: the first site's verdict, or how near the Sun; nothing for what is not in the sky. */
+function reasonOf(event: ForecastEvent): string | null {
   const [home] = event.local;
   if (home !== undefined) return home.verdict;
   const elongationDeg = leastElongationDeg(event);
-  return observable || elongationDeg === null
-    ? null
-    : `Not observable, ${fixed(elongationDeg, 0)}° from the Sun.`;
+  return elongationDeg === null ? null : `Not observable, ${fixed(elongationDeg, 0)}° from the Sun.`;
 }

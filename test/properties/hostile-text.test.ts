@@ -58,6 +58,7 @@ describe('hostile text', () => {
           STAMP,
         );
         expect(text.replaceAll('\r\n', '')).not.toMatch(/[\r\n\u0000-\u0008\u000b-\u001f]/);
+        expect(text).not.toMatch(/\p{Surrogate}/u);
         for (const line of text.split('\r\n')) expect(Buffer.byteLength(line)).toBeLessThanOrEqual(75);
         const [entry, ...more] = readStrictly(text);
         expect(more).toEqual([]);
