@@ -21,7 +21,9 @@ await build({
     js: "import { createRequire as __createRequire } from 'node:module'; const require = __createRequire(import.meta.url);",
   },
   chunkNames: 'chunks/[name]-[hash]',
-  minifySyntax: true,
+  // A command that answers at once is read at once: half the bytes are a third of the start-up.
+  minify: true,
+  keepNames: true,
   legalComments: 'linked',
 });
 

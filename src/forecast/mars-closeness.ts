@@ -27,7 +27,16 @@ export function marsCloseness(tt: TtDays): Closeness {
   return closenessOf(approaches[NEIGHBOURS]!, approaches);
 }
 
+/** Neighbouring approaches share most of their neighbours. */
+const known = new Map<number, Approach>();
+
 function approachOf(n: number): Approach {
+  const approach = known.get(n) ?? findApproach(n);
+  known.set(n, approach);
+  return approach;
+}
+
+function findApproach(n: number): Approach {
   const relative = (tt: TtDays) =>
     subtractMotions(kepler.heliocentric('mars', tt), kepler.heliocentric('earth', tt));
   const mean = meanInstant(cycle, n);

@@ -144,7 +144,7 @@ function cycleFindings(question: Question, n: number, wide: Span, context: Searc
   const exact = kind.exactValue?.(sky, subject, reckoning);
   const accepted = candidates(kind, whole).filter(({ tt }) => kind.accepts(sky, subject, tt));
   return accepted.flatMap(({ tt: traced, branch }, index, { length: of }): Finding[] => {
-    if (!kind.reports(sky, subject, traced, limits)) return [];
+    if (traced < wide.from || traced >= wide.to || !kind.reports(sky, subject, traced, limits)) return [];
     const tt = exact === undefined ? traced : decide(kind, traced, signal(traced).rate, exact);
     const estimate = nearest(kind.sought, onKepler, tt, KEPLER_REACH_DAYS);
     const sameSense =

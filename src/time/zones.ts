@@ -1,4 +1,5 @@
-import { DateTime, IANAZone } from 'luxon';
+import { DateTime, FixedOffsetZone, IANAZone } from 'luxon';
+import type { Zone } from 'luxon';
 import { utcMillis } from './instants.js';
 import type { LocalDate, UtcMillis } from './instants.js';
 
@@ -8,17 +9,24 @@ const DAY_MILLIS = 24 * HOUR_MILLIS;
 /** Whether the name is one of the IANA time zone database, such as `Europe/Vienna` or `UTC`. */
 export const isZone = (name: string): boolean => IANAZone.isValidZone(name);
 
-function zoneOf(name: string): IANAZone {
+/** Asking the host's data whether a zone exists costs a millisecond, and reports ask thousands of times. */
+const known = new Map<string, Zone>([['UTC', FixedOffsetZone.utcInstance]]);
+
+function zoneOf(name: string): Zone {
+  const zone = known.get(name);
+  if (zone !== undefined) return zone;
   if (!isZone(name))
     throw new RangeError(`Time zone "${name}" is unknown; write an IANA name such as "Europe/Vienna".`);
-  return IANAZone.create(name);
+  const made = IANAZone.create(name);
+  known.set(name, made);
+  return made;
 }
 
 /** Wall-clock time at a zone, in English and Latin digits whatever the host speaks. */
 export function localDateTime(utc: UtcMillis, zone: string): DateTime {
   return DateTime.fromMillis(utc, {
     zone: zoneOf(zone),
-    locale: 'en-GB',
+    locale: 'en',
     numberingSystem: 'latn',
     outputCalendar: 'gregory',
   });
@@ -61,4 +69,4 @@ export function utcOfLocal(date: LocalDate, hour: number, minute: number, zone: 
 
 /** The zone's short name at an instant, as English readers in Britain know it: `CET`, `BST`, elsewhere `GMT-5`. */
 export const zoneAbbreviation = (utc: UtcMillis, zone: string): string =>
-  localDateTime(utc, zone).toFormat('ZZZZ');
+  zone === 'UTC' ? 'UTC' : localDateTime(utc, zone).setLocale('en-GB').toFormat('ZZZZ');
