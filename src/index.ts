@@ -23,5 +23,5 @@ export {
 export { eventsCalendar } from './output/calendar/index.js';
 export { SiteError, makeSite } from './sky/index.js';
 export type { HorizonPoint, LocalView, Site, SiteWords } from './sky/index.js';
-export { isoUtc, parseInstantUtc, ttFromUtc, utcFromTt } from './time/index.js';
+export { isoUtc, parseInstantUtc, ttFromUtc, utcFromTt, utcMillis } from './time/index.js';
 export type { LocalDate, TtDays, UtcMillis } from './time/index.js';

@@ -9,7 +9,11 @@ import type { SiderealOptions } from './commands/sidereal.js';
 const from = (): Option =>
   new Option('--from <date>', 'first instant, included: 2027-01-01 or 2027-01-31T18:30Z');
 const to = (): Option => new Option('--to <date>', 'end, not included');
-const kind = (): Option => new Option('--kind <kinds>', 'kinds of event, set apart by commas');
+const kind = (): Option =>
+  new Option(
+    '--kind <kinds>',
+    'kinds of event, like opposition,appulse; an unknown one is answered with the list',
+  );
 const reckoning = (): Option =>
   new Option('--reckoning <coordinate>', 'longitude or right-ascension, for kinds that have a choice');
 const site = (): Option => new Option('--site <place>', 'LAT,LON[,ELEVATION], or the id of a site of --plan');

@@ -9,10 +9,13 @@ export interface Fault {
   readonly problem: string;
 }
 
-/** `plan.yaml:12:11: sites[1].zone: …`, one line whatever it is about. */
+/** `plan.yaml:12:11: sites[1].zone: …`, one line and harmless to a terminal, whatever it is about. */
 export function faultLine(file: string, { line, column, field, problem }: Fault): string {
   const place = line === 0 ? file : `${file}:${line}:${column}`;
-  return [place, ...(field === '' ? [] : [field]), problem].join(': ').replace(/\s+/g, ' ');
+  return [place, ...(field === '' ? [] : [field]), problem]
+    .join(': ')
+    .replace(/\s+/g, ' ')
+    .replace(/\p{Cc}/gu, '\u{FFFD}');
 }
 
 export const inOrderOfPlace = (a: Fault, b: Fault): number =>

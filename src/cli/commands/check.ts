@@ -1,6 +1,7 @@
 import { titleOf } from '../../bodies/index.js';
 import { faultLine, loadPlan } from '../../plan/index.js';
 import type { Plan } from '../../plan/index.js';
+import { quoted } from '../../plan/words/index.js';
 import { isoUtc } from '../../time/index.js';
 import { deliver } from '../deliver.js';
 import type { DeliveryOptions } from '../deliver.js';
@@ -32,7 +33,7 @@ export function check(file: string, options: CheckOptions): void {
 
 function summaryOf({ title, from, to, sites, bodies, residuals }: Plan): string {
   return [
-    `no faults. “${title}”, ${isoUtc(from)} to ${isoUtc(to)}`,
+    `no faults. ${quoted(title)}, ${isoUtc(from)} to ${isoUtc(to)}`,
     count(sites.length, 'site'),
     ...(bodies === undefined ? [] : [bodies.map(titleOf).join(', ')]),
     `${count(residuals.length, 'pair')} of residuals`,
