@@ -94,15 +94,23 @@ const higher = (moments: readonly Moment[]): Moment | null =>
 
 /** How far the lowest of the bodies clears the local horizon, degrees; −∞ where one of them does not show. */
 function clearanceDeg(sky: SkyOverSite, bodies: readonly SkyPlanet[], tt: TtDays): number {
-  const sunAltitudeDeg = sky.horizontal('sun', tt).altitudeDeg;
-  return Math.min(
-    ...bodies.map((body) => {
-      const { altitudeDeg, azimuthDeg } = sky.horizontal(body, tt);
-      if (altitudeDeg - sunAltitudeDeg < darknessNeeded[body].arcusVisionisDeg) return -Infinity;
-      const refracted = altitudeDeg + refractionDeg(altitudeDeg);
-      const clearance = refracted - Math.max(0, horizonAltitudeDeg(sky.site, azimuthDeg));
-      return refracted >= LOWEST_LOOK_DEG && clearance > 0 ? clearance : -Infinity;
-    }),
+  let least = Infinity;
+  for (const body of bodies) {
+    const { altitudeDeg, azimuthDeg } = sky.horizontal(body, tt);
+    const refracted = altitudeDeg + refractionDeg(altitudeDeg);
+    const clearance = refracted - Math.max(0, horizonAltitudeDeg(sky.site, azimuthDeg));
+    if (refracted < LOWEST_LOOK_DEG || clearance <= 0 || isDrowned(sky, body, altitudeDeg, tt))
+      return -Infinity;
+    least = Math.min(least, clearance);
+  }
+  return least;
+}
+
+/** Whether the twilight outshines a body. The Sun, below the horizon at such times, need not be asked about a high one. */
+function isDrowned(sky: SkyOverSite, body: SkyPlanet, altitudeDeg: number, tt: TtDays): boolean {
+  const { arcusVisionisDeg } = darknessNeeded[body];
+  return (
+    altitudeDeg < arcusVisionisDeg && altitudeDeg - sky.horizontal('sun', tt).altitudeDeg < arcusVisionisDeg
   );
 }
 

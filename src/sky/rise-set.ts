@@ -17,7 +17,9 @@ export const SUN_RISE_ALTITUDE_DEG = -50 / 60;
 /** 0.1 s. */
 const TOLERANCE_DAYS = 1e-6;
 const SIDEREAL_DAY_DAYS = 1 / SIDEREAL_TURNS_PER_DAY;
+/** Each pass brings the transit a hundred times nearer, so the one after a correction of 8 s is good to 0.1 s. */
 const MERIDIAN_PASSES = 4;
+const PASS_ENOUGH_DAYS = 1e-4;
 
 export interface Crossing {
   readonly tt: TtDays;
@@ -85,7 +87,9 @@ export function meridianTransits(
   while (guess < to + SIDEREAL_DAY_DAYS / 2) {
     let tt = ttDays(guess);
     for (let pass = 0; pass < MERIDIAN_PASSES; pass++) {
-      tt = ttDays(tt + (wrapPi(target - sky.horizontal(body, tt).hourAngle) / TWO_PI) * SIDEREAL_DAY_DAYS);
+      const offDays = (wrapPi(target - sky.horizontal(body, tt).hourAngle) / TWO_PI) * SIDEREAL_DAY_DAYS;
+      tt = ttDays(tt + offDays);
+      if (Math.abs(offDays) < PASS_ENOUGH_DAYS) break;
     }
     if (tt >= from && tt < to) transits.push(tt);
     guess += SIDEREAL_DAY_DAYS;

@@ -65,12 +65,7 @@ describe('localViewer', () => {
       '2027-01-28T12:00:00Z',
       'Not visible from here: Mercury and Jupiter are not both high enough while the sky is dark.',
     ],
-    [
-      48.2,
-      ['mars'],
-      '2026-04-25T12:00:00Z',
-      'Not visible from here: Mars is too low while the sky is dark.',
-    ],
+    [48.2, ['mars'], '2026-04-25T12:00:00Z', 'Not visible from here: Mars is too low while the sky is dark.'],
   ] as const)('at latitude %d for %j on %s: %s', (latitudeDeg, bodies, iso, sentence) => {
     expect(localViewer(siteAt(latitudeDeg, 16.3), paths)(bodies, ttOf(iso)).verdict).toBe(sentence);
   });

@@ -36,7 +36,7 @@ describe('safeHours', () => {
   });
 
   it('see a sunrise coming that follows the end of the night', () => {
-    // By the clock of a zone five hours further east, noon falls on the sunrises of February.
+    // By a clock five hours ahead of Vienna's, noon falls on the sunrises of February.
     const sky = skyAt(48.2, 16.3, { zone: 'Etc/GMT-6' });
     let close = 0;
     for (let day = 1; day <= 28; day++) {

@@ -68,10 +68,24 @@ describe('nightOf', () => {
     expect(order).not.toContain(null);
   });
 
-  it('ends with the sunrise after its sunset, also where noon by the clock is in the dark', () => {
+  it('takes the sunrise there is where noon by the clock is in the dark', () => {
     // Tokyo by UTC: noon is 21:00 there, so the interval begins at night and holds a day before the next evening.
     const { sunset, sunrise } = night(35.7, 139.7, 'UTC', '2027-03-01');
     expect(isoUtc(utcFromTt(sunrise!))).toMatch(/^2027-03-01T21:/);
     expect(isoUtc(utcFromTt(sunset!))).toMatch(/^2027-03-02T08:/);
+  });
+
+  it('takes the later of two sunrises, the one that ends the night', () => {
+    // Vienna by a clock five hours ahead: in February the Sun rises a minute earlier each day, once across noon.
+    const sky = skyAt(48.2, 16.3, { zone: 'Etc/GMT-6' });
+    const nights = Array.from({ length: 28 }, (_, i) =>
+      nightOf(sky, localDate(`2027-02-${String(i + 1).padStart(2, '0')}`)),
+    );
+    const withTwo = nights.filter(
+      ({ sun, from, to }) =>
+        sun.crossings(-50 / 60).filter(({ tt, is }) => is === 'rise' && tt >= from && tt < to).length === 2,
+    );
+    expect(withTwo).toHaveLength(1);
+    expect(withTwo[0]!.sunrise! > withTwo[0]!.sunset!).toBe(true);
   });
 });
