@@ -5,7 +5,7 @@ import type { Site } from '../../sky/index.js';
 import { deliver } from '../deliver.js';
 import type { DeliveryOptions } from '../deliver.js';
 import { Faults } from '../faults.js';
-import { progressOf } from '../progress.js';
+import { withProgress } from '../progress.js';
 import { readChoice } from '../read-choice.js';
 import { readList } from '../read-list.js';
 import { readNumber } from '../read-number.js';
@@ -43,17 +43,17 @@ export async function events(options: EventsOptions): Promise<void> {
   faults.throwIfAny();
 
   const sites = site === undefined ? [] : [site];
-  const progress = progressOf('searching', options.quiet ?? false);
-  const found = forecast({
-    ...span!,
-    ...(kinds && { kinds }),
-    ...(bodies && { bodies }),
-    ...(reckoning && { reckoning }),
-    ...(withinDeg !== undefined && { withinDeg }),
-    sites,
-    onProgress: progress.tell,
-  });
-  progress.end();
+  const found = withProgress('searching', options.quiet ?? false, (onProgress) =>
+    forecast({
+      ...span!,
+      ...(kinds && { kinds }),
+      ...(bodies && { bodies }),
+      ...(reckoning && { reckoning }),
+      ...(withinDeg !== undefined && { withinDeg }),
+      sites,
+      onProgress,
+    }),
+  );
   const count = found.events.length;
   deliver(
     await written(found, sites, format, options.out !== undefined),

@@ -1,8 +1,7 @@
 import { writeOutputs } from '../../plan/files/index.js';
 import { runPlan } from '../../plan/index.js';
-import { quoted } from '../../plan/words/index.js';
 import { planFrom } from '../plan-from.js';
-import { progressOf } from '../progress.js';
+import { withProgress } from '../progress.js';
 
 export interface RunOptions {
   readonly into?: string;
@@ -12,9 +11,7 @@ export interface RunOptions {
 /** A whole plan, end to end. */
 export async function run(file: string, { into = 'out', quiet = false }: RunOptions): Promise<void> {
   const plan = await planFrom(file);
-  const progress = progressOf(`running ${quoted(plan.title)}`, quiet);
-  const files = runPlan(plan, progress.tell);
-  progress.end();
+  const files = withProgress('running the plan', quiet, (tell) => runPlan(plan, tell));
   const written = writeOutputs(into, plan.title, files);
   if (!quiet) {
     const names = written.map(({ name }) => name);
