@@ -1,5 +1,5 @@
-/** Rounded to a number of decimals, as a number: no false precision, never −0, and the same bytes everywhere. */
-export const rounded = (value: number, digits: number): number => Number(value.toFixed(digits)) + 0;
+/** Rounded to a number of decimals, as a number: no false precision, and the same bytes everywhere. */
+export const rounded = (value: number, digits: number): number => Number(value.toFixed(digits));
 
 /** How many digits each quantity deserves: a little beyond what the best source knows, and no more. */
 export const round = {

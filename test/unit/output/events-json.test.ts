@@ -39,6 +39,8 @@ describe('events as JSON', () => {
     const [event] = read(eventsJson(aForecast([pairEvent(none)]), [])).events;
     expect(event).toMatchObject(none);
     expect(event).toHaveProperty('interval', null);
+    const [unlit] = read(eventsJson(aForecast([soloEvent({}, { magnitude: null })]), [])).events;
+    expect(unlit).toMatchObject({ circumstances: { magnitude: null } });
   });
 
   it('never writes −0, and shows no digits that the source does not know', () => {

@@ -45,10 +45,11 @@ describe('events on a terminal', () => {
 
   it('styles words without moving them, and never blank ones', () => {
     const tagged: TerminalStyle = { strong: (text) => `<${text}>`, quiet: (text) => `{${text}}` };
+    const noMean = pairEvent({ residualDays: { mean: null, kepler: 0.1 } });
     for (const width of [60, 120, 200]) {
-      const styled = terminalLines(mixed, london, width, tagged);
+      const styled = terminalLines([...mixed, noMean], london, width, tagged);
       expect(styled.map((line) => line.replace(/[<>{}]/g, ''))).toEqual(
-        terminalLines(mixed, london, width, plain),
+        terminalLines([...mixed, noMean], london, width, plain),
       );
       expect(styled.join('')).not.toMatch(/\{\}|<>/);
     }
