@@ -37,7 +37,7 @@ const boundaries = Object.entries(rooms).map(([room, below]) => {
               : []),
             {
               regex: `^(?:\\.\\./)+(?:${Object.keys(rooms).join('|')})/(?!(?:[a-z-]+/)?index\\.js$)`,
-              message: "Enter another room by its index.js, not by a file inside it.",
+              message: 'Enter another room by its index.js, not by a file inside it.',
             },
             ...(pureRooms.includes(room)
               ? [{ regex: '^node:', message: 'Rooms below plan/ are pure: no Node API.' }]
@@ -59,13 +59,24 @@ export default tseslint.config(
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
       '@typescript-eslint/no-non-null-assertion': 'off',
       '@typescript-eslint/consistent-type-imports': 'error',
-      '@typescript-eslint/switch-exhaustiveness-check': ['error', { considerDefaultExhaustiveForUnions: true }],
+      '@typescript-eslint/switch-exhaustiveness-check': [
+        'error',
+        { considerDefaultExhaustiveForUnions: true },
+      ],
     },
   },
   {
     files: pureRooms.map((room) => `src/${room}/**/*.{ts,tsx}`),
     rules: {
-      'no-restricted-globals': ['error', 'process', 'Buffer', '__dirname', 'performance', 'window', 'document'],
+      'no-restricted-globals': [
+        'error',
+        'process',
+        'Buffer',
+        '__dirname',
+        'performance',
+        'window',
+        'document',
+      ],
       'no-restricted-properties': [
         'error',
         { object: 'Date', property: 'now', message: 'The core has no clock.' },
@@ -75,10 +86,13 @@ export default tseslint.config(
       ],
       'no-restricted-syntax': [
         'error',
-        { selector: "NewExpression[callee.name='Date'][arguments.length=0]", message: 'The core has no clock.' },
         {
-          selector: "CallExpression[callee.property.name=/^toLocale/]",
-          message: "The core has no locale.",
+          selector: "NewExpression[callee.name='Date'][arguments.length=0]",
+          message: 'The core has no clock.',
+        },
+        {
+          selector: 'CallExpression[callee.property.name=/^toLocale/]',
+          message: 'The core has no locale.',
         },
       ],
     },

@@ -6,8 +6,12 @@ export interface DeliveryOptions {
   readonly quiet?: boolean;
 }
 
-/** Brings a result to --out FILE, whole or not at all, or to standard output. A note about it goes to standard error. */
-export function deliver(text: string, note: string, { out, quiet = false }: DeliveryOptions): void {
+/** Brings a result to --out FILE, whole or not at all, or to standard output. Notes about it go to standard error. */
+export function deliver(
+  text: string,
+  notes: readonly string[],
+  { out, quiet = false }: DeliveryOptions,
+): void {
   if (out === undefined) {
     process.stdout.write(text);
   } else {
@@ -18,5 +22,6 @@ export function deliver(text: string, note: string, { out, quiet = false }: Deli
     // A pipe or a device has no whole to wait for; a folder refuses by itself.
     else writeFileSync(out, text);
   }
-  if (!quiet) process.stderr.write(`${out === undefined ? note : `${note}, written to ${out}`}\n`);
+  const all = out === undefined ? notes : [...notes, `written to ${out}`];
+  if (!quiet) process.stderr.write(all.map((note) => `${note}\n`).join(''));
 }

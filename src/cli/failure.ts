@@ -27,7 +27,7 @@ export function failureOf(fault: unknown): Failure {
   if (fault instanceof OutputError) return { exitCode: 2, lines: [`--into: ${fault.message}`] };
   if (isSystemError(fault)) {
     const refusal = pathRefusals[fault.code];
-    if (refusal !== undefined) return { exitCode: 2, lines: [`${fault.path ?? 'file'}: ${refusal}`] };
+    if (refusal !== undefined) return { exitCode: 2, lines: [`${pathWords(fault.path)}: ${refusal}`] };
   }
   const message = fault instanceof Error ? fault.message : String(fault);
   return {
@@ -35,6 +35,8 @@ export function failureOf(fault: unknown): Failure {
     lines: [`synodos failed, through no fault of yours: ${message.replace(/\s+/g, ' ')}`],
   };
 }
+
+const pathWords = (path = ''): string => (path === '' ? 'a path without a name' : path);
 
 /** Asking for help is no fault; asking for nothing is. */
 function commanderFailure({ code, exitCode, message }: CommanderError): Failure {

@@ -9,7 +9,7 @@ import { DAYS_PER_JULIAN_YEAR } from '../time/index.js';
 export interface NamedPeriod {
   readonly name: string;
   readonly body: Body | null;
-  readonly days: number;
+  readonly periodDays: number;
 }
 
 const daysPerUnit: Readonly<Record<string, number>> = { h: 1 / 24, d: 1, y: DAYS_PER_JULIAN_YEAR };
@@ -17,7 +17,7 @@ const daysPerUnit: Readonly<Record<string, number>> = { h: 1 / 24, d: 1, y: DAYS
 /** Reads `mars`, `687d`, `1.88y` (Julian years) or `23.93h`. */
 export function readPeriod(word: string): Reading<NamedPeriod> {
   const name = word.trim().toLowerCase();
-  if (isBody(name)) return { value: { name, body: name, days: siderealPeriodDays(name) } };
+  if (isBody(name)) return { value: { name, body: name, periodDays: siderealPeriodDays(name) } };
   const match = /^(\d{1,12}(?:\.\d{1,12})?)([hdy]?)$/.exec(name);
   if (match === null) {
     return {
@@ -27,5 +27,5 @@ export function readPeriod(word: string): Reading<NamedPeriod> {
   const perUnit = daysPerUnit[match[2]!];
   if (perUnit === undefined)
     return { problem: `${quoted(word)} has no unit: write ${name}d, ${name}y or ${name}h` };
-  return { value: { name, body: null, days: Number(match[1]) * perUnit } };
+  return { value: { name, body: null, periodDays: Number(match[1]) * perUnit } };
 }

@@ -26,6 +26,12 @@ export interface SeasonSample {
   readonly elongationDeg: number;
   /** Hours of that night in which the planet can be shown in the dark at the site; null without a site. */
   readonly darkHours: number | null;
+  /**
+   * The same hours before and after the middle of the night. Without a site: the hours from sunset, and to sunrise, for
+   * which the elongation alone keeps the planet up in a night of twelve hours.
+   */
+  readonly eveningHours: number;
+  readonly morningHours: number;
   readonly state: SeasonState;
 }
 
@@ -76,12 +82,15 @@ function sampleAll(
     over === null ? null : darkHalves(over, bodies, nightOf(over, eveningOf(utc, over.site.zone)));
   return bodies.map((body, i) => {
     const elongationDeg = signedElongationDeg(sky, body, tt);
-    const hours = halves?.[i] ?? null;
+    const dark = halves?.[i] ?? null;
+    const { evening, morning } = dark ?? equinoxHalves(elongationDeg);
     return {
       utc,
       elongationDeg,
-      darkHours: hours === null ? null : hours.evening + hours.morning,
-      state: hours === null ? stateByElongation(elongationDeg) : stateByHours(hours, elongationDeg),
+      darkHours: dark === null ? null : evening + morning,
+      eveningHours: evening,
+      morningHours: morning,
+      state: dark === null ? stateByElongation(elongationDeg) : stateByHours(dark, elongationDeg),
     };
   });
 }
@@ -91,6 +100,13 @@ function signedElongationDeg(sky: TrackedSky, body: SkyPlanet, tt: TtDays): numb
   const angle = angleBetween(sky.tracks.position(body, frame, tt), sky.tracks.position('sun', frame, tt));
   const ahead = sky.longitude(body, frame, tt).value - sky.longitude('sun', frame, tt).value;
   return degreesFromRadians(angle) * (wrapPi(ahead) >= 0 ? 1 : -1);
+}
+
+/** The sky turns 15° an hour, so a planet this far from the Sun sets (or rises) that much later (or earlier). */
+function equinoxHalves(elongationDeg: number): DarkHours {
+  const hours = Math.abs(elongationDeg) / 15;
+  const [near, far] = [Math.min(6, hours), Math.max(0, hours - 6)];
+  return elongationDeg >= 0 ? { evening: near, morning: far } : { evening: far, morning: near };
 }
 
 interface DarkHours {

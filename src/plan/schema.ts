@@ -52,9 +52,15 @@ const siteId = checked(z.string().max(40), (word) =>
     : `${quoted(word)} does not name a site: use letters, digits and hyphens, like north-hill`,
 );
 
+/** JSON Schema leaves the length of such a list open unless told. */
+const PAIR_FOR_EDITORS = { minItems: 2, maxItems: 2 } as const;
+
 const horizonPoint = z
   .tuple([z.number().min(0).max(360), z.number().min(-10).max(90)], 'write two numbers, [azimuth, altitude]')
-  .meta({ description: 'Azimuth (degrees from north through east) and the altitude of the horizon there.' });
+  .meta({
+    description: 'Azimuth (degrees from north through east) and the altitude of the horizon there.',
+    ...PAIR_FOR_EDITORS,
+  });
 
 const site = z
   .strictObject({
@@ -76,6 +82,10 @@ const site = z
       .meta({ description: 'The share of clear evenings, January to December, 0 … 1: a climate average.' }),
   })
   .meta({ description: 'A place with a clock, a horizon and a sky.' });
+
+const bodyPair = z
+  .tuple([z.enum(bodies), z.enum(bodies)], 'write two bodies, like [earth, mars]')
+  .meta({ description: 'Two planets, or a planet and the Earth.', ...PAIR_FOR_EDITORS });
 
 const dateRange = z.strictObject({
   name: text(120).optional(),
@@ -128,10 +138,7 @@ export const planSchema = z
       .meta({ description: 'What to look for.' }),
     residuals: z
       .strictObject({
-        pairs: z
-          .array(z.tuple([z.enum(bodies), z.enum(bodies)], 'write two bodies, like [earth, mars]'))
-          .min(1)
-          .max(36),
+        pairs: z.array(bodyPair).min(1).max(36),
         span: span.optional().meta({ description: 'The span of the plan by default; decades tell more.' }),
       })
       .optional()

@@ -287,6 +287,12 @@ describe('the command line', () => {
     expect(span).toEqual({ from: '2026-12-31T23:00:00Z', to: '2027-03-31T22:00:00Z' });
   });
 
+  it('says where a zone was looked up from coordinates', () => {
+    expect(synodos([...oppositions, '--site', '48.2,16.4']).stderr).toBe(
+      '2 events\n48.2, 16.4: times of Europe/Vienna, looked up from the coordinates; name the zone to have another\n',
+    );
+  });
+
   it('knows the sites of a plan by their ids', () => {
     const { status, stdout } = synodos([
       ...oppositions,
@@ -310,7 +316,7 @@ describe('the command line', () => {
     const file = join(folder, `events.${format}`);
     writeFileSync(file, 'old');
     const { status, stdout, stderr } = synodos([...oppositions, '--format', format, '--out', file]);
-    expect([status, stdout, stderr]).toEqual([0, '', `2 events, written to ${file}\n`]);
+    expect([status, stdout, stderr]).toEqual([0, '', `2 events\nwritten to ${file}\n`]);
     expect(readFileSync(file, 'utf8')).toMatch(start);
   });
 
@@ -383,6 +389,24 @@ describe('residuals', () => {
       format,
     ];
     expect(synodos(args)).toMatchObject({ status: 0, stdout: expect.stringMatching(pattern) as string });
+  });
+
+  it('of a mean cycle are 18.24 days rms and 26.13 at worst for Mars over 1900–2100', () => {
+    const args = [
+      'residuals',
+      '--pair',
+      'earth,mars',
+      '--from',
+      '1900-01-01',
+      '--to',
+      '2100-01-01',
+      '--format',
+      'json',
+    ];
+    const { mean } = JSON.parse(synodos(args).stdout) as { mean: { rmsDays: number; worstDays: number } };
+    // Within 2 %: the prototype refined on the same library, with another ΔT.
+    expect(Math.abs(mean.rmsDays / 18.24 - 1)).toBeLessThan(0.02);
+    expect(Math.abs(mean.worstDays / 26.13 - 1)).toBeLessThan(0.02);
   });
 
   it('say when Table 1 is used beyond the years it is made for', () => {

@@ -27,7 +27,7 @@ export function check(file: string, options: CheckOptions): void {
       : lines.map((line) => `${line}\n`).join('');
   const note =
     'plan' in reading ? `${file}: ${summaryOf(reading.plan)}` : `${file}: ${count(found.length, 'fault')}`;
-  deliver(text, note, options);
+  deliver(text, [note], options);
   if (found.length > 0) process.exitCode = 2;
 }
 

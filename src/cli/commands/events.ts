@@ -13,6 +13,7 @@ import { readSite } from '../read-site.js';
 import type { SiteOptions } from '../read-site.js';
 import { readSpan } from '../read-span.js';
 import type { SpanWords } from '../read-span.js';
+import { zoneNotes } from '../zone-notes.js';
 import { terminalStyle, terminalWidth } from '../terminal.js';
 
 export interface EventsOptions extends SpanWords, SiteOptions, DeliveryOptions {
@@ -57,7 +58,10 @@ export async function events(options: EventsOptions): Promise<void> {
   const count = found.events.length;
   deliver(
     await written(found, sites, format, options.out !== undefined),
-    count === 0 ? 'no events in this span' : `${count} ${count === 1 ? 'event' : 'events'}`,
+    [
+      count === 0 ? 'no events in this span' : `${count} ${count === 1 ? 'event' : 'events'}`,
+      ...zoneNotes(sites),
+    ],
     options,
   );
 }

@@ -36,7 +36,9 @@ export function period(firstWord: string, secondWord: string, options: PeriodOpt
   const repeats = nearRepeats(synodicDays, CALENDAR_YEAR_DAYS);
   deliver(
     written(first!, second!, synodicDays, repeats, format),
-    `near-repeats are counted in mean Gregorian years of ${CALENDAR_YEAR_DAYS} days, so that they come back at the same date`,
+    [
+      `near-repeats are counted in mean Gregorian years of ${CALENDAR_YEAR_DAYS} days, so that they come back at the same date`,
+    ],
     options,
   );
 }
@@ -45,7 +47,7 @@ function synodicOf(first: NamedPeriod, second: NamedPeriod): number {
   try {
     return first.body !== null && second.body !== null
       ? synodicPeriodOf(first.body, second.body)
-      : synodicPeriodDays(first.days, second.days);
+      : synodicPeriodDays(first.periodDays, second.periodDays);
   } catch (fault) {
     if (fault instanceof PeriodError) throw new UsageError([`period: ${fault.message}`]);
     throw fault;
@@ -65,8 +67,8 @@ function written(
         aligned({
           header: ['period', 'days', 'Julian years'],
           rows: [
-            [first.name, fixed(first.days, 3), fixed(first.days / DAYS_PER_JULIAN_YEAR, 4)],
-            [second.name, fixed(second.days, 3), fixed(second.days / DAYS_PER_JULIAN_YEAR, 4)],
+            [first.name, fixed(first.periodDays, 3), fixed(first.periodDays / DAYS_PER_JULIAN_YEAR, 4)],
+            [second.name, fixed(second.periodDays, 3), fixed(second.periodDays / DAYS_PER_JULIAN_YEAR, 4)],
             ['synodic', fixed(synodicDays, 3), fixed(synodicDays / DAYS_PER_JULIAN_YEAR, 4)],
           ],
         }),

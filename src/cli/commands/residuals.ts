@@ -36,7 +36,7 @@ export function residuals(options: ResidualsOptions): void {
   faults.throwIfAny();
 
   const series = seriesOf({ pair: pair!, ...span!, ...(kind && { kind }), ...(reckoning && { reckoning }) });
-  deliver(written(series, format), noteOf(series), options);
+  deliver(written(series, format), notesOf(series), options);
 }
 
 function readPair(words: string | undefined, faults: Faults): ResidualRequest['pair'] | undefined {
@@ -65,12 +65,10 @@ function seriesOf(request: ResidualRequest): ResidualSeries {
   }
 }
 
-function noteOf({ rows, beyondTable1 }: ResidualSeries): string {
-  const count = `${rows.length} ${rows.length === 1 ? 'event' : 'events'}`;
-  return beyondTable1
-    ? `${count}; Table 1 of the mean elements is made for 1800–2050 and used beyond it`
-    : count;
-}
+const notesOf = ({ rows, beyondTable1 }: ResidualSeries): string[] => [
+  `${rows.length} ${rows.length === 1 ? 'event' : 'events'}`,
+  ...(beyondTable1 ? ['Table 1 of the mean elements is made for 1800–2050 and used beyond it'] : []),
+];
 
 function written(series: ResidualSeries, format: Format): string {
   const sheets = [spreadSheet(series), residualSheet(series)] as const;

@@ -2,6 +2,7 @@ import { writeOutputs } from '../../plan/files/index.js';
 import { runPlan } from '../../plan/index.js';
 import { planFrom } from '../plan-from.js';
 import { withProgress } from '../progress.js';
+import { zoneNotes } from '../zone-notes.js';
 
 export interface RunOptions {
   readonly into?: string;
@@ -15,6 +16,7 @@ export async function run(file: string, { into = 'out', quiet = false }: RunOpti
   const written = writeOutputs(into, plan.title, files);
   if (!quiet) {
     const names = written.map(({ name }) => name);
-    process.stderr.write(`written into ${into}: ${names.join(', ')}\n`);
+    const notes = [`written into ${into}: ${names.join(', ')}`, ...zoneNotes(plan.sites)];
+    process.stderr.write(notes.map((note) => `${note}\n`).join(''));
   }
 }

@@ -14,6 +14,7 @@ import { readSite } from '../read-site.js';
 import type { SiteOptions } from '../read-site.js';
 import { siderealMoment } from '../sidereal-moment.js';
 import type { PositionAtMoment, SiderealMoment } from '../sidereal-moment.js';
+import { zoneNotes } from '../zone-notes.js';
 
 export interface SiderealOptions extends SiteOptions, DeliveryOptions {
   readonly at?: string;
@@ -38,7 +39,7 @@ export async function sidereal(options: SiderealOptions): Promise<void> {
   const moment = siderealMoment(site!, utc!, position);
   deliver(
     format === 'json' ? json(site!, moment) : words(moment),
-    `${site!.name}: times of ${site!.zone}${site!.zoneFrom === 'coordinates' ? ', looked up from the coordinates; --zone names another' : ''}`,
+    [`sidereal time at ${site!.name}`, ...zoneNotes([site!])],
     options,
   );
 }

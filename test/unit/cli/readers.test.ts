@@ -43,7 +43,7 @@ describe('a period', () => {
     ['24h', 1],
     ['1.88Y', 1.88 * 365.25],
   ])('of %s is %f days', (word, days) => {
-    expect(readPeriod(word)).toMatchObject({ value: { body: null, days } });
+    expect(readPeriod(word)).toMatchObject({ value: { body: null, periodDays: days } });
   });
 
   it('of a body is its sidereal one', () => {
