@@ -109,6 +109,15 @@ const oneBody = z.strictObject({
     })
     .optional()
     .describe('Mars only: how near it comes among its neighbouring approaches.'),
+  localExtremes: z
+    .array(
+      z.strictObject({
+        utc: instant('The lesser turn of the distance'),
+        heliocentricDistanceAu: number('Distance from the Sun’s centre then', 'astronomical units', 0),
+      }),
+    )
+    .optional()
+    .describe('Perihelia and aphelia: further turns of a distance that wobbles, because the Sun swings too.'),
 });
 
 const twoBodies = z.strictObject({

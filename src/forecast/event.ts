@@ -103,6 +103,13 @@ export interface SingleCircumstances extends BodyCircumstances {
   readonly about: 'one-body';
   /** Oppositions and closest approaches of Mars: how near it comes among its neighbours. */
   readonly closeness?: Closeness;
+  /** Perihelia and aphelia whose distance turns more than once because the Sun swings too: its lesser turns. */
+  readonly localExtremes?: readonly LocalExtreme[];
+}
+
+export interface LocalExtreme {
+  readonly utc: UtcMillis;
+  readonly heliocentricDistanceAu: number;
 }
 
 export interface Closeness {

@@ -36,6 +36,8 @@ export interface Finding {
   readonly tt: TtDays;
   readonly mean: TtDays | null;
   readonly kepler: TtDays | null;
+  /** Further turns of the same sense, of an extreme distance that wobbles about it. */
+  readonly localTurns: readonly TtDays[];
 }
 
 /** The part of its cycle within which an event lies from its mean instant. */
@@ -121,7 +123,7 @@ const methods: Readonly<Record<Kind['search'], Method>> = {
   },
 };
 
-const lone = { ordinal: 0, index: 1, of: 1 };
+const lone = { ordinal: 0, index: 1, of: 1, localTurns: [] };
 
 /**
  * Every event of one cycle. Its stretch is followed from end to end wherever it holds an event in the span, because
@@ -157,6 +159,7 @@ function cycleFindings(question: Question, n: number, wide: Span, context: Searc
         ...{ index: index + 1, of },
         tt,
         mean: meanEstimate(n, tt),
+        localTurns: [],
         kepler: sameSense ? estimate : null,
       },
     ];

@@ -1,5 +1,5 @@
 import type { Planet, SkyPlanet } from '../bodies/index.js';
-import { rotate } from '../math/index.js';
+import { length, rotate } from '../math/index.js';
 import { localViewer } from '../sky/index.js';
 import type { Site } from '../sky/index.js';
 import { SECONDS_PER_DAY, ttDays, utcFromTt, utcUncertaintySeconds } from '../time/index.js';
@@ -70,7 +70,7 @@ function intervalOf({ kind, tt }: Finding, sky: TrackedSky, { seconds, certain }
   };
 }
 
-function circumstancesOf({ kind, subject, tt }: Finding, sky: TrackedSky): Circumstances {
+function circumstancesOf({ kind, subject, tt, localTurns }: Finding, sky: TrackedSky): Circumstances {
   const [a, b] = subject;
   switch (kind.circumstances) {
     case 'one-body':
@@ -78,6 +78,14 @@ function circumstancesOf({ kind, subject, tt }: Finding, sky: TrackedSky): Circu
         about: 'one-body',
         ...bodyCircumstances(a as SkyPlanet, tt, geometryFor(sky)),
         ...(closenessKinds.includes(kind.name) && a === 'mars' ? { closeness: marsCloseness(tt) } : {}),
+        ...(localTurns.length === 0
+          ? {}
+          : {
+              localExtremes: localTurns.map((turn) => ({
+                utc: utcFromTt(turn),
+                heliocentricDistanceAu: length(sky.geometry.heliocentric(a, turn)),
+              })),
+            }),
       };
     case 'two-bodies':
       return pairCircumstances(a as SkyPlanet, b as SkyPlanet, tt, geometryFor(sky));

@@ -79,6 +79,14 @@ function circumstancesJson(circumstances: Circumstances) {
         about: circumstances.about,
         ...bodyJson(circumstances),
         ...(circumstances.closeness === undefined ? {} : { closeness: circumstances.closeness }),
+        ...(circumstances.localExtremes === undefined
+          ? {}
+          : {
+              localExtremes: circumstances.localExtremes.map(({ utc, heliocentricDistanceAu }) => ({
+                utc: isoUtc(utc),
+                heliocentricDistanceAu: round.au(heliocentricDistanceAu),
+              })),
+            }),
       };
     case 'two-bodies':
       return {
