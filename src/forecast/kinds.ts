@@ -1,6 +1,13 @@
 import { isInner } from '../bodies/index.js';
 import type { Body, Planet, SkyPlanet } from '../bodies/index.js';
-import { anomalisticCycle, heliocentricCycle, meanInstant, pairCycle, sunCycle } from '../cycles/index.js';
+import {
+  anomalisticCycle,
+  cycleNumberAt,
+  heliocentricCycle,
+  meanInstant,
+  pairCycle,
+  sunCycle,
+} from '../cycles/index.js';
 import type { MeanCycle, SunConfiguration } from '../cycles/index.js';
 import { subtractMotions } from '../ephemeris/index.js';
 import type { Frame } from '../ephemeris/index.js';
@@ -366,9 +373,7 @@ function loopStepDays(subject: Subject): number {
   return subject.includes('venus') ? 8 : 12;
 }
 
-function nearestMean(cycle: MeanCycle, tt: TtDays): TtDays {
-  return meanInstant(cycle, Math.round((tt - cycle.epoch) / cycle.periodDays));
-}
+const nearestMean = (cycle: MeanCycle, tt: TtDays): TtDays => meanInstant(cycle, cycleNumberAt(cycle, tt));
 
 function nearer(to: TtDays, a: TtDays, b: TtDays): TtDays {
   return Math.abs(a - to) <= Math.abs(b - to) ? a : b;

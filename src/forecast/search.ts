@@ -113,12 +113,12 @@ const methods: Readonly<Record<Kind['search'], Method>> = {
         ttDays(estimate + reach),
         kind.stepDays(subject),
       );
-      const [extreme] = turns
+      const [extreme, ...others] = turns
         .filter(({ is }) => is === kind.sought)
         .sort((a, b) => sense * (b.value - a.value));
-      return extreme === undefined
-        ? []
-        : [{ ...question, ...lone, cycle: n, tt: extreme.tt, mean, kepler: estimate }];
+      if (extreme === undefined) return [];
+      const localTurns = others.map(({ tt }) => tt).sort((a, b) => a - b);
+      return [{ ...question, ...lone, cycle: n, tt: extreme.tt, mean, kepler: estimate, localTurns }];
     });
   },
 };

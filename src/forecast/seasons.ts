@@ -115,8 +115,10 @@ interface DarkHours {
 }
 
 /** How long each planet stands high enough over the site's horizon in the dark, before and after the middle of the night. */
-function darkHalves(over: SkyOverSite, bodies: readonly SkyPlanet[], { from, to }: Night): DarkHours[] {
-  const middle = (from + to) / 2;
+function darkHalves(over: SkyOverSite, bodies: readonly SkyPlanet[], night: Night): DarkHours[] {
+  const { from, to, sunset, sunrise } = night;
+  // Clocks may be an hour and more from the Sun's time, so the middle is the Sun's wherever it sets.
+  const middle = sunset === null || sunrise === null ? (from + to) / 2 : (sunset + sunrise) / 2;
   const counts = bodies.map(() => ({ evening: 0, morning: 0 }));
   for (let at = from; at < to; at = ttDays(at + NIGHT_STEP_DAYS)) {
     const sunDeg = over.horizontal('sun', at).altitudeDeg;
