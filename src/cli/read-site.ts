@@ -1,4 +1,5 @@
 import { oneOf, quoted, readZone } from '../plan/words/index.js';
+import { SiteError, makeSite } from '../sky/index.js';
 import type { Site } from '../sky/index.js';
 import type { Faults } from './faults.js';
 import { readNumber } from './read-number.js';
@@ -20,16 +21,13 @@ export async function readSite(options: SiteOptions, faults: Faults): Promise<Si
       faults.add('--plan', 'stands alone: name one of its sites with --site ID');
     return undefined;
   }
-  return /^[\s\d+-][\s\d.,+-]*$/.test(options.site)
-    ? siteOfCoordinates(options.site, options.zone, faults)
-    : siteOfPlan(options.site, options, faults);
+  if (!/^[\s\d+-][\s\d.,+-]*$/.test(options.site)) return siteOfPlan(options.site, options, faults);
+  if (options.plan !== undefined)
+    faults.add('--plan', 'goes with the id of a site: coordinates need no plan');
+  return siteOfCoordinates(options.site, options.zone, faults);
 }
 
-async function siteOfCoordinates(
-  words: string,
-  zoneWord: string | undefined,
-  faults: Faults,
-): Promise<Site | undefined> {
+function siteOfCoordinates(words: string, zoneWord: string | undefined, faults: Faults): Site | undefined {
   const parts = words.split(',');
   const numbers = parts.map(readNumber).map((reading) => ('value' in reading ? reading.value : NaN));
   const [latitudeDeg = NaN, longitudeDeg = NaN, elevationM = 0] = numbers;
@@ -38,7 +36,6 @@ async function siteOfCoordinates(
     faults.add('--site', `${quoted(words)} is not a place: ${COORDINATES}`);
     return undefined;
   }
-  const { SiteError, makeSite } = await import('../sky/index.js');
   try {
     const name = `${latitudeDeg}, ${longitudeDeg}`;
     return makeSite({

@@ -101,6 +101,14 @@ const wrong: readonly (readonly [args: readonly string[], lines: readonly string
     ['--zone: stands alone: give the site with --site LAT,LON'],
   ],
   [
+    ['events', ...DATES, '--site', '48.2,11.6', '--plan', 'data/demo/plan.yaml'],
+    ['--plan: goes with the id of a site: coordinates need no plan'],
+  ],
+  [
+    ['events', ...DATES, '--site', 'amselgrat', '--plan', 'data/demo/plan.yaml', '--zone', 'UTC'],
+    ['--zone: goes with coordinates: a site of a plan has its zone there'],
+  ],
+  [
     ['events', ...DATES, '--site', 'amselgrad', '--plan', 'data/demo/plan.yaml'],
     ['--site: "amselgrad" is the id of no site of data/demo/plan.yaml. Did you mean amselgrat?'],
   ],

@@ -1,4 +1,4 @@
-import { writeOutputs } from '../../plan/files/index.js';
+import { readyFolder, writeOutputs } from '../../plan/files/index.js';
 import { runPlan } from '../../plan/index.js';
 import { planFrom } from '../plan-from.js';
 import { withProgress } from '../progress.js';
@@ -12,6 +12,7 @@ export interface RunOptions {
 /** A whole plan, end to end. */
 export async function run(file: string, { into = 'out', quiet = false }: RunOptions): Promise<void> {
   const plan = await planFrom(file);
+  readyFolder(into);
   const files = withProgress('running the plan', quiet, (tell) => runPlan(plan, tell));
   const written = writeOutputs(into, plan.title, files);
   if (!quiet) {

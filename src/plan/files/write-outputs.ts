@@ -2,24 +2,24 @@ import { lstatSync, mkdirSync, realpathSync } from 'node:fs';
 import { join } from 'node:path';
 import { manifestOf } from './manifest.js';
 import type { OutputFile } from './manifest.js';
+import { OutputError } from './output-error.js';
 import { writeWhole } from './write-whole.js';
-
-/** A folder or a name that nothing may be written to. Its message says why and what would be right. */
-export class OutputError extends Error {
-  override readonly name = 'OutputError';
-}
 
 /** Letters, digits, hyphens and single dots: nothing that leads anywhere else, on any system. */
 const BARE_NAME = /^[A-Za-z0-9][A-Za-z0-9-]*(?:\.[A-Za-z0-9-]+)*$/;
 
+/** Makes an output folder where it is missing, and says where it really is. Done before the work, it spares it. */
+export function readyFolder(folder: string): string {
+  mkdirSync(folder, { recursive: true });
+  return realpathSync(folder);
+}
+
 /**
- * Writes a plan's outputs and their manifest into a folder, each whole or not at all, the manifest last. Makes the
- * folder where it is missing. Nothing is written outside it: a name that leads out, a link or a folder in the place of
- * a file is refused before the first byte.
+ * Writes a plan's outputs and their manifest into a folder, each whole or not at all, the manifest last. Nothing is
+ * written outside it: a name that leads out, a link or a folder in the place of a file is refused before the first byte.
  */
 export function writeOutputs(folder: string, title: string, files: readonly OutputFile[]): OutputFile[] {
-  mkdirSync(folder, { recursive: true });
-  const place = realpathSync(folder);
+  const place = readyFolder(folder);
   const all = [...files, manifestOf(title, files)];
   for (const { name } of all) refuseUnsafe(place, name);
   for (const { name, text } of all) writeWhole(join(place, name), Buffer.from(text));
