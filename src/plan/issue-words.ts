@@ -36,7 +36,7 @@ export function issueWords(issue: Issue, root: unknown): string {
     case 'too_big':
       return outOfRange(issue, value, ownRemedy);
     case 'custom':
-      return issue.message;
+    // The schema has nothing that could raise the rest.
     case 'invalid_format':
     case 'not_multiple_of':
     case 'unrecognized_keys':

@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { bodies, planets } from '../bodies/index.js';
 import { kindNames } from '../forecast/index.js';
 import { parseLocalDate } from '../time/index.js';
-import { quoted, readInstant, readZone } from './words/index.js';
+import { MOST_WITHIN_DEG, quoted, readInstant, readZone } from './words/index.js';
 import type { Reading } from './words/index.js';
 
 /** The days of the week as a plan names them, Monday first. */
@@ -130,7 +130,7 @@ export const planSchema = z
         reckoning: z.enum(['longitude', 'right-ascension']).optional().meta({
           description: 'For kinds that have a choice; by default each is reckoned as the almanacs do.',
         }),
-        withinDeg: z.number().positive().max(20).optional().meta({
+        withinDeg: z.number().positive().max(MOST_WITHIN_DEG).optional().meta({
           description: 'Appulses up to this separation, degrees; 5 by default.',
         }),
       })

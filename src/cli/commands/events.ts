@@ -1,6 +1,6 @@
 import { forecast } from '../../forecast/index.js';
 import type { Forecast } from '../../forecast/index.js';
-import { readKind, readPlanet } from '../../plan/words/index.js';
+import { MOST_WITHIN_DEG, readKind, readPlanet } from '../../plan/words/index.js';
 import type { Site } from '../../sky/index.js';
 import { deliver } from '../deliver.js';
 import type { DeliveryOptions } from '../deliver.js';
@@ -13,8 +13,8 @@ import { readSite } from '../read-site.js';
 import type { SiteOptions } from '../read-site.js';
 import { readSpan } from '../read-span.js';
 import type { SpanWords } from '../read-span.js';
-import { zoneNotes } from '../zone-notes.js';
 import { terminalStyle, terminalWidth } from '../terminal.js';
+import { zoneNotes } from '../zone-notes.js';
 
 export interface EventsOptions extends SpanWords, SiteOptions, DeliveryOptions {
   readonly kind?: string;
@@ -26,8 +26,6 @@ export interface EventsOptions extends SpanWords, SiteOptions, DeliveryOptions {
 
 type Format = 'table' | 'json' | 'csv' | 'md' | 'ics';
 const formats: readonly [Format, ...Format[]] = ['table', 'json', 'csv', 'md', 'ics'];
-/** Wider than this an appulse is none. */
-const MOST_WITHIN_DEG = 20;
 
 export async function events(options: EventsOptions): Promise<void> {
   const faults = new Faults();

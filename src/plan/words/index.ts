@@ -1,3 +1,4 @@
+export { MOST_WITHIN_DEG } from './limits.js';
 export { didYouMean, nearestName, oneOf } from './nearest-name.js';
 export { quoted } from './quoted.js';
 export { readInstant } from './read-instant.js';
