@@ -1,5 +1,6 @@
-import { oneOf, quoted, readInstant } from './words/index.js';
+import { SiteError, makeSite } from '../sky/index.js';
 import { fieldOf, valueAt } from './issue-words.js';
+import { oneOf, quoted, readInstant, readZone } from './words/index.js';
 import type { Path } from './yaml-document.js';
 
 /** A fault between fields, at the field that should change. */
@@ -22,11 +23,13 @@ export function crossFaults(root: unknown): CrossFault[] {
   ];
 }
 
+/** Bare dates are midnights at home, and beside an instant with its own offset that decides which comes first. */
 function spansThatEndTooSoon(root: unknown): CrossFault[] {
+  const zone = homeZone(root);
   return [['span'], ['residuals', 'span']].flatMap((path) => {
     const [from, to] = [wordAt(root, [...path, 'from']), wordAt(root, [...path, 'to'])];
     if (from === null || to === null) return [];
-    const [start, end] = [readInstant(from, null), readInstant(to, null)];
+    const [start, end] = [readInstant(from, zone), readInstant(to, zone)];
     return 'value' in start && 'value' in end && end.value <= start.value
       ? [
           {
@@ -36,6 +39,23 @@ function spansThatEndTooSoon(root: unknown): CrossFault[] {
         ]
       : [];
   });
+}
+
+/** The zone of the home site; null where there is none, or where it cannot be told for another fault. */
+function homeZone(root: unknown): string | null {
+  const site = ['sites', Math.max(0, siteIds(root).indexOf(wordAt(root, ['home'])))];
+  const zone = valueAt(root, [...site, 'zone']);
+  if (typeof zone === 'string') return 'value' in readZone(zone) ? zone : null;
+  const [latitudeDeg, longitudeDeg] = ['latitude', 'longitude'].map((field) =>
+    valueAt(root, [...site, field]),
+  );
+  if (typeof latitudeDeg !== 'number' || typeof longitudeDeg !== 'number') return null;
+  try {
+    return makeSite({ id: 'home', latitudeDeg, longitudeDeg }).zone;
+  } catch (fault) {
+    if (fault instanceof SiteError) return null;
+    throw fault;
+  }
 }
 
 function holidaysThatEndTooSoon(root: unknown): CrossFault[] {

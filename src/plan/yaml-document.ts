@@ -1,5 +1,5 @@
 import { LineCounter, isMap, isNode, isScalar, isSeq, parseDocument, visit } from 'yaml';
-import type { Node, YAMLError } from 'yaml';
+import type { Document, Node, YAMLError } from 'yaml';
 import type { Fault } from './fault.js';
 
 export type Path = readonly (string | number)[];
@@ -52,6 +52,7 @@ export function readYaml(text: string): YamlDocument {
   };
   const complaints = [...document.errors, ...document.warnings];
   const faults = firstOfEachLine(complaints, place);
+  faults.push(...removeNamelessFields(document, place));
   const aliases = aliasFault(document.contents, place);
   if (aliases !== null) faults.push(aliases);
   const sound = aliases === null && complaints.every(({ code }) => HARMLESS.includes(code));
@@ -73,6 +74,23 @@ function firstOfEachLine(complaints: readonly YAMLError[], place: (offset: numbe
     byLine.set(line, { line, column, field: '', problem: remedies[code] ?? `not YAML: ${message}` });
   }
   return [...byLine.values()];
+}
+
+/** Fields whose key is no plain name. Takes them out, so that what is left can still be read. */
+function removeNamelessFields(document: Document, place: (offset: number) => Place): Fault[] {
+  const faults: Fault[] = [];
+  visit(document, {
+    Pair: (_, { key, value }) => {
+      if (isScalar(key) && key.value !== null) return undefined;
+      const problem =
+        key === null || isScalar(key)
+          ? 'a field without a name stands here: write its name before the colon'
+          : 'a list, a group or an alias stands where a name should: write a plain name before the colon';
+      faults.push({ ...place(startOf(key, startOf(value, 0))), field: '', problem });
+      return visit.REMOVE;
+    },
+  });
+  return faults;
 }
 
 /** An alias to nowhere or to what it stands in itself, or more of them than a plan needs. */

@@ -1,5 +1,5 @@
-import { spawn } from 'node:child_process';
-import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { spawn, spawnSync } from 'node:child_process';
+import { closeSync, existsSync, mkdtempSync, openSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
@@ -349,6 +349,27 @@ describe('the command line', () => {
     const status = await new Promise((resolve) => run.on('close', resolve));
     expect(told).not.toMatch(/EPIPE|Error|failed/);
     expect(status).toBe(0);
+  });
+
+  it.skipIf(!existsSync('/dev/full'))('tells in one line that its output cannot be written', () => {
+    const full = openSync('/dev/full', 'w');
+    const { status, stderr } = spawnSync(process.execPath, [COMMAND, 'period', 'mars', 'earth', '--quiet'], {
+      stdio: ['ignore', full, 'pipe'],
+      encoding: 'utf8',
+    });
+    closeSync(full);
+    expect(stderr).toMatch(/^synodos failed, through no fault of yours: ENOSPC[^\n]*\n$/);
+    expect(status).toBe(1);
+  });
+
+  it.each([
+    [0, oppositions],
+    [2, ['events']],
+  ])('ends with status %i whether or not somebody reads its notes', async (wanted, args) => {
+    const run = spawn(process.execPath, [COMMAND, ...args]);
+    run.stdout.resume();
+    run.stderr.destroy();
+    expect(await new Promise((resolve) => run.on('close', resolve))).toBe(wanted);
   });
 
   it('tells of a failure that is the tool’s own with exit status 1', () => {

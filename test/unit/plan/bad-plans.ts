@@ -121,6 +121,35 @@ export const badPlans: readonly BadPlan[] = [
     ],
   },
   {
+    what: 'a span that ends before midnight comes to the home site (03:00 UTC there)',
+    text: 'title: T\nspan: { from: 2027-01-01, to: 2027-01-01T02:00Z }\nsites: [{ id: a, latitude: -31, longitude: -70, zone: America/Santiago }]\n',
+    lines: [
+      'p.yaml:2:31: span.to: "2027-01-01T02:00Z" is not after "2027-01-01": the end of a span is not in it, write a later one',
+    ],
+  },
+  {
+    what: 'the same where home is the second site and its zone is looked up',
+    text: 'title: T\nspan: { from: 2027-01-01, to: 2027-01-01T02:00Z }\nhome: b\nsites: [{ id: a, latitude: 48, longitude: 11 }, { id: b, latitude: -31.2, longitude: -70.6 }]\n',
+    lines: [
+      'p.yaml:2:31: span.to: "2027-01-01T02:00Z" is not after "2027-01-01": the end of a span is not in it, write a later one',
+    ],
+  },
+  {
+    what: 'a home whose zone cannot be told: its own faults alone',
+    text: 'title: T\nspan: { from: 2027-01-01, to: 2027-01-01T02:00Z }\nsites: [{ id: a, latitude: 98, longitude: 11 }]\n',
+    lines: ['p.yaml:3:28: sites[0].latitude: 98 is out of range: write at most 90'],
+  },
+  {
+    what: 'a list, a group and nothing for the name of a field, beside another fault',
+    text: `${good}? [a, b]\n: 1\n? { c: d }\n: 2\n: 3\ncolour: red\n`,
+    lines: [
+      'p.yaml:3:3: a list, a group or an alias stands where a name should: write a plain name before the colon',
+      'p.yaml:5:3: a list, a group or an alias stands where a name should: write a plain name before the colon',
+      'p.yaml:7:1: a field without a name stands here: write its name before the colon',
+      'p.yaml:8:1: "colour" is no field here. There are: title, span, home, stamp, sites, schoolHolidays, openingRules, forecast, residuals',
+    ],
+  },
+  {
     what: 'a backward span beside other faults (cross checks run all the same)',
     text: 'titel: T\nspan: { from: 2028-01-01, to: 2027-01-01 }\n',
     lines: [

@@ -33,6 +33,14 @@ describe('a bad plan', () => {
   });
 });
 
+describe('a plan', () => {
+  it('may end a moment after midnight has come to its home', () => {
+    const text =
+      'title: T\nspan: { from: 2027-01-01, to: 2027-01-01T03:01Z }\nsites: [{ id: a, latitude: -31, longitude: -70, zone: America/Santiago }]\n';
+    expect(readPlan(text)).toMatchObject({ plan: { from: Date.parse('2027-01-01T03:00Z') } });
+  });
+});
+
 describe('any text', () => {
   it('is a plan or has faults, and never throws', () => {
     const yamlish = fc.string({
