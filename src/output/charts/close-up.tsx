@@ -1,11 +1,18 @@
 import { titleOf } from '../../bodies/index.js';
 import type { BodyCircumstances, PairCircumstances } from '../../forecast/index.js';
-import { angleWords } from '../numbers.js';
+import { angleWords, fixed } from '../numbers.js';
 import { Figure } from './figure.js';
+import { PlanetDisc } from './planet-disc.js';
+import { px } from './px.js';
 
-const SIZE = 300;
-const RADIUS = 132;
-const CENTRE = SIZE / 2;
+const WIDTH = 320;
+const RADIUS = 112;
+const CENTRE = { x: WIDTH / 2, y: RADIUS + 22 };
+const SCALE_Y = CENTRE.y + RADIUS + 16;
+/** The discs as a telescope shows them, below the field, all close-ups at one scale. */
+const DISCS_Y = SCALE_Y + 54;
+const DISC_PIXELS_PER_ARCSEC = 1.1;
+const HEIGHT = DISCS_Y + 58;
 const SMALLEST_DISC_PX = 4;
 /** Fields that people look through: a telescope's at high and low power, large and small binoculars. */
 const FIELDS_DEG = [0.5, 1, 2.5, 4, 6.5] as const;
@@ -17,79 +24,72 @@ interface CloseUpProps {
   readonly pair: PairCircumstances;
   readonly title: string;
   readonly finding: string;
+  readonly legend: string;
   readonly tableId: string;
 }
 
 /** The smallest of the usual fields that holds two bodies with some room. */
-const fieldFor = (separationDeg: number): number =>
+export const fieldFor = (separationDeg: number): number =>
   FIELDS_DEG.find((field) => field >= separationDeg * 1.4) ?? FIELDS_DEG.at(-1)!;
 
-/** Two bodies to scale in a round field, as they stand in the sky: north up, east left. */
-export function CloseUp({ id, pair, title, finding, tableId }: CloseUpProps) {
+/** Two bodies to scale in a round field, as they stand in the sky: north up, east left; beneath, their discs enlarged. */
+export function CloseUp({ id, pair, title, finding, legend, tableId }: CloseUpProps) {
   const fieldDeg = fieldFor(pair.separationDeg);
   const pixelsPerDeg = (2 * RADIUS) / fieldDeg;
   const angle = (pair.positionAngleDeg * Math.PI) / 180;
   // From the first body to the second: north is up, and position angle turns through east, which is left.
   const [east, north] = [Math.sin(angle) * pair.separationDeg, Math.cos(angle) * pair.separationDeg];
-  const place = (part: number) => ({
-    x: CENTRE - east * part * pixelsPerDeg,
-    y: CENTRE - north * part * pixelsPerDeg,
+  const place = (part: number): Point => ({
+    x: CENTRE.x - east * part * pixelsPerDeg,
+    y: CENTRE.y - north * part * pixelsPerDeg,
   });
-  const bar = BARS_ARCMIN.findLast((arcmin) => (arcmin / 60) * pixelsPerDeg < RADIUS * 0.7) ?? BARS_ARCMIN[0];
-  const barPixels = (bar / 60) * pixelsPerDeg;
   return (
     <Figure
-      id={id}
-      title={title}
-      finding={finding}
-      width={SIZE}
-      height={SIZE + 34}
-      tableId={tableId}
-      legend={`${finding} The circle is a field of ${angleWords(fieldDeg)}.`}
+      {...{ id, title, finding, tableId }}
+      width={WIDTH}
+      height={HEIGHT}
+      legend={<p class="note">{`${legend} The circle is a field of ${angleWords(fieldDeg)}.`}</p>}
     >
-      <circle cx={CENTRE} cy={CENTRE} r={RADIUS} class="field" />
-      <text x={CENTRE} y={14} class="middle">
+      <circle cx={CENTRE.x} cy={CENTRE.y} r={RADIUS} class="field" />
+      <text x={CENTRE.x} y={14} class="middle quiet">
         north
       </text>
-      <text x={4} y={CENTRE - 6}>
-        E
+      <text x={2} y={CENTRE.y + 4} class="quiet">
+        east
       </text>
-      <g class="drift">
-        <path d={`M${CENTRE + RADIUS - 34} ${CENTRE + RADIUS - 8}h30m-7 -4l7 4l-7 4`} />
-        <text x={CENTRE + RADIUS - 36} y={CENTRE + RADIUS - 4} class="end">
-          drift
-        </text>
-      </g>
-      <Disc body={pair.bodies[0]} at={place(-0.5)} pixelsPerDeg={pixelsPerDeg} />
-      <Disc body={pair.bodies[1]} at={place(0.5)} pixelsPerDeg={pixelsPerDeg} />
-      <g class="scale">
-        <line x1={CENTRE - barPixels / 2} x2={CENTRE + barPixels / 2} y1={SIZE + 10} y2={SIZE + 10} />
-        <text x={CENTRE} y={SIZE + 28} class="middle">
-          {bar}′
-        </text>
-      </g>
+      <Drift />
+      <InField body={pair.bodies[0]} at={place(-0.5)} pixelsPerDeg={pixelsPerDeg} />
+      <InField body={pair.bodies[1]} at={place(0.5)} pixelsPerDeg={pixelsPerDeg} />
+      <ScaleBar pixelsPerDeg={pixelsPerDeg} />
+      <Enlarged body={pair.bodies[0]} x={WIDTH * 0.27} />
+      <Enlarged body={pair.bodies[1]} x={WIDTH * 0.73} />
     </Figure>
   );
 }
 
-interface DiscProps {
+interface Point {
+  readonly x: number;
+  readonly y: number;
+}
+
+interface InFieldProps {
   readonly body: BodyCircumstances;
-  readonly at: { readonly x: number; readonly y: number };
+  readonly at: Point;
   readonly pixelsPerDeg: number;
 }
 
 /** At true size where that can be seen, else a point. */
-function Disc({ body, at, pixelsPerDeg }: DiscProps) {
+function InField({ body, at, pixelsPerDeg }: InFieldProps) {
   const diameter = (body.diameterArcsec / 3600) * pixelsPerDeg;
   const radius = Math.max(SMALLEST_DISC_PX, diameter) / 2;
-  const right = at.x > CENTRE;
+  const right = at.x > CENTRE.x;
   return (
     <g>
-      <circle cx={round(at.x)} cy={round(at.y)} r={round(radius)} class="disc" />
+      <circle cx={px(at.x)} cy={px(at.y)} r={px(radius)} class="point" />
       <text
-        x={round(at.x + (right ? -1 : 1) * (radius + 7))}
-        y={round(at.y - 7)}
-        class={right ? 'end name' : 'name'}
+        x={px(at.x + (right ? -1 : 1) * (radius + 7))}
+        y={px(at.y + 4)}
+        class={right ? 'end name inside' : 'name inside'}
       >
         {titleOf(body.body)}
       </text>
@@ -97,4 +97,46 @@ function Disc({ body, at, pixelsPerDeg }: DiscProps) {
   );
 }
 
-const round = (value: number): number => Math.round(value * 10) / 10;
+/** Where the turning sky carries what is in the field: west. */
+const Drift = () => (
+  <g class="drift">
+    <path d={`M${WIDTH - 30} ${CENTRE.y + RADIUS - 6}h26m-7 -4l7 4l-7 4`} />
+    <text x={WIDTH - 36} y={CENTRE.y + RADIUS - 2} class="end quiet">
+      drift
+    </text>
+  </g>
+);
+
+function ScaleBar({ pixelsPerDeg }: { pixelsPerDeg: number }) {
+  const bar = BARS_ARCMIN.findLast((arcmin) => (arcmin / 60) * pixelsPerDeg < RADIUS * 0.7) ?? BARS_ARCMIN[0];
+  const length = px((bar / 60) * pixelsPerDeg);
+  return (
+    <g class="scale">
+      <path d={`M${px(CENTRE.x - length / 2)} ${SCALE_Y - 4}v4h${length}v-4`} />
+      <text x={CENTRE.x} y={SCALE_Y + 16} class="middle">
+        {bar}′
+      </text>
+    </g>
+  );
+}
+
+/** A disc at the common scale, with its size and how much of it is lit. */
+function Enlarged({ body, x }: { body: BodyCircumstances; x: number }) {
+  const { diameterArcsec, illuminatedFraction } = body;
+  return (
+    <g>
+      <PlanetDisc
+        body={body}
+        x={x}
+        y={DISCS_Y}
+        radius={Math.max(1, (diameterArcsec * DISC_PIXELS_PER_ARCSEC) / 2)}
+      />
+      <text x={x} y={DISCS_Y + 38} class="middle name">
+        {titleOf(body.body)}
+      </text>
+      <text x={x} y={DISCS_Y + 54} class="middle quiet">
+        {fixed(diameterArcsec, 1)}″, {fixed(illuminatedFraction * 100, 0)} % lit
+      </text>
+    </g>
+  );
+}

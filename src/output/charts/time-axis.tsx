@@ -18,7 +18,11 @@ export function timeTicks(from: UtcMillis, to: UtcMillis): Tick[] {
   const first = localDateTime(from, 'UTC').startOf('month');
   const months = localDateTime(to, 'UTC').diff(first, 'months').months;
   const step = MONTH_STEPS.find((candidate) => months / candidate <= WANTED_TICKS) ?? 1200;
-  const start = step >= 12 ? first.startOf('year') : first.startOf('quarter');
+  const years = step / 12;
+  const start =
+    step >= 12
+      ? first.set({ year: Math.ceil(first.year / years) * years, month: 1 })
+      : first.startOf('quarter');
   return Array.from({ length: Math.ceil(months / step) + 2 }, (_, i) => start.plus({ months: i * step }))
     .map((date) => ({
       utc: utcMillis(date.toMillis()),

@@ -1,20 +1,17 @@
-import type { ForecastEvent, KindName } from '../../forecast/index.js';
-import { kindNames } from '../../forecast/index.js';
+import type { ForecastEvent } from '../../forecast/index.js';
+import { SurenessStrip } from '../charts/index.js';
 import { kindTitles } from '../event-words.js';
 import { uncertaintyWords } from '../uncertainty-words.js';
 import type { ReportInput } from './report-input.js';
+import { surenessByKind } from './sureness.js';
 import { Table } from './table.js';
 
-interface Sureness {
-  readonly kind: KindName;
-  readonly count: number;
-  readonly middleSeconds: number;
-  readonly worstSeconds: number;
-}
-
 export function CertaintyChapter({ forecast: { events, source } }: ReportInput) {
-  const rows = kindNames.flatMap((kind) => surenessOf(kind, events));
-  const grazing = events.filter(({ certain }) => !certain);
+  const kinds = surenessByKind(events);
+  if (kinds.length === 0) return <p>Source: {source.description}.</p>;
+  const surest = kinds[0]!;
+  const vaguest = kinds.at(-1)!;
+  const title = certaintyTitle(events);
   return (
     <>
       <p>
@@ -23,37 +20,44 @@ export function CertaintyChapter({ forecast: { events, source } }: ReportInput) 
         near a station, or where two slow planets meet, they become hours. What is flat, such as the greatest
         brilliancy, has days.
       </p>
+      <SurenessStrip
+        title={title}
+        finding={`${title}. Surest: ${kindTitles[surest.kind]}, ${uncertaintyWords(surest.middleSeconds)}; least sure: ${kindTitles[vaguest.kind]}, ${uncertaintyWords(vaguest.middleSeconds)}.`}
+        tableId="sureness-table"
+        kinds={kinds.map((kind) => ({ ...kind, title: kindTitles[kind.kind] }))}
+      />
       <Table
-        caption="95 % half-widths of the instants in this report, in UTC"
+        id="sureness-table"
+        caption="Half-widths of the intervals that hold the instants in 95 of 100 cases, in UTC"
         columns={[
           { title: 'Kind', cell: ({ kind }) => kindTitles[kind] },
           { title: 'Events', class: 'number', cell: ({ count }) => count },
           { title: 'Typically', cell: ({ middleSeconds }) => uncertaintyWords(middleSeconds) },
           { title: 'At worst', cell: ({ worstSeconds }) => uncertaintyWords(worstSeconds) },
         ]}
-        rows={rows}
+        rows={kinds}
         keyOf={({ kind }) => kind}
       />
       <p class="note">
-        Source: {source.description}.{' '}
-        {grazing.length === 0 ? '' : `${grazing.length} events graze and may be missing elsewhere.`}
+        Source: {source.description}. {grazingWords(events)}
       </p>
     </>
   );
 }
 
-function surenessOf(kind: KindName, events: readonly ForecastEvent[]): Sureness[] {
-  const seconds = events
-    .filter((event) => event.kind === kind)
-    .map(({ uncertaintySeconds }) => uncertaintySeconds.utc)
-    .sort((a, b) => a - b);
-  if (seconds.length === 0) return [];
-  return [
-    {
-      kind,
-      count: seconds.length,
-      middleSeconds: seconds[Math.floor(seconds.length / 2)]!,
-      worstSeconds: seconds.at(-1)!,
-    },
-  ];
+const SURE_SECONDS = 900;
+
+/** `339 of 426 instants are known to a quarter of an hour or better`. */
+export function certaintyTitle(events: readonly ForecastEvent[]): string {
+  const sure = events.filter(({ uncertaintySeconds }) => uncertaintySeconds.utc <= SURE_SECONDS).length;
+  const whole = sure === events.length ? `All ${sure}` : `${sure} of ${events.length}`;
+  return `${whole} instants are known to a quarter of an hour or better`;
+}
+
+function grazingWords(events: readonly ForecastEvent[]): string {
+  const grazing = events.filter(({ certain }) => !certain).length;
+  if (grazing === 0) return '';
+  return grazing === 1
+    ? 'One event grazes, and another ephemeris may lack it.'
+    : `${grazing} events graze, and another ephemeris may lack them.`;
 }

@@ -1,37 +1,113 @@
+import { titleOf } from '../../bodies/index.js';
 import type { PairCircumstances } from '../../forecast/index.js';
+import { compassWords } from '../../sky/index.js';
 import { localDateTime } from '../../time/index.js';
 import { CloseUp } from '../charts/index.js';
-import { bodiesWords } from '../event-words.js';
-import { headlineOf } from '../headline.js';
-import { angleWords } from '../numbers.js';
-import { closeUpMeetings } from './choose.js';
+import { lookWords, nightWords } from '../look-words.js';
+import { angleWords, fixed } from '../numbers.js';
+import { dateAndClock, uncertaintyShort } from '../uncertainty-words.js';
+import { CLOSE_UP_DEG, closeUpMeetings } from './choose.js';
 import type { MeetingMoment } from './choose.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
+import { Table } from './table.js';
 
 export function CloseUpsChapter(input: ReportInput) {
-  const zone = zoneOf(input);
   const moments = closeUpMeetings(input.forecast);
   if (moments.length === 0)
-    return <p>No two planets come within 2° of each other where they can be seen from here.</p>;
+    return <p>No two planets come within {CLOSE_UP_DEG}° of each other where they can be seen.</p>;
   return (
-    <div class="closeups">
-      {moments.map(({ meeting, event }) => (
-        <CloseUp
-          key={meeting.id}
-          id={`close-up-${event.id.replaceAll(/[^a-z0-9]+/g, '-')}`}
-          pair={pairOf({ meeting, event })}
-          title={`${bodiesWords(event)}, ${angleWords(meeting.leastSeparationDeg)} apart, ${localDateTime(event.utc, zone).toFormat('d LLLL yyyy')}`}
-          finding={headlineOf(event, zone)}
-          tableId="events-table"
-        />
-      ))}
-    </div>
+    <>
+      <p>
+        Each meeting is drawn for its least separation, to scale, as it stands in the sky: north up, east
+        left. Beneath are the two discs at one scale, with their phases, as a telescope shows them.
+      </p>
+      <div class="closeups">
+        {moments.map((moment) => (
+          <CloseUp
+            key={moment.meeting.id}
+            id={`close-up-${moment.event.id.replaceAll(/[^a-z0-9]+/g, '-')}`}
+            pair={pairOf(moment)}
+            title={titleFor(moment)}
+            finding={`${titleFor(moment)}. ${sightWords(moment, input)}`}
+            legend={`${whenWords(moment, input)} ${sightWords(moment, input)}`}
+            tableId="close-ups-table"
+          />
+        ))}
+      </div>
+      <NumbersOfAll moments={moments} input={input} />
+    </>
   );
 }
 
 /** Moments of a meeting are told of two bodies. */
-function pairOf({ event: { circumstances, id } }: MeetingMoment): PairCircumstances {
+export function pairOf({ event: { circumstances, id } }: MeetingMoment): PairCircumstances {
   if (circumstances.about !== 'two-bodies') throw new TypeError(`${id} is not about two bodies`);
   return circumstances;
+}
+
+/** `Venus 14′ north of Neptune`. */
+export function titleFor(moment: MeetingMoment): string {
+  const { bodies, separationDeg, positionAngleDeg } = pairOf(moment);
+  const side = compassWords(positionAngleDeg + 180);
+  return `${titleOf(bodies[0].body)} ${angleWords(separationDeg)} ${side} of ${titleOf(bodies[1].body)}`;
+}
+
+const whenWords = ({ event }: MeetingMoment, input: ReportInput): string =>
+  `Closest ${dateAndClock(event, zoneOf(input))}, ${uncertaintyShort(event.uncertaintySeconds.utc)}.`;
+
+/** When and where to see it, at the first site that can. */
+export function sightWords({ event, seenFrom }: MeetingMoment, { sites }: ReportInput): string {
+  const site = sites.find(({ id }) => id === seenFrom?.site);
+  const look = seenFrom?.bestLook ?? null;
+  if (site === undefined || look === null)
+    return `On ${localDateTime(event.utc, 'UTC').toFormat('cccc d LLLL yyyy')}, ${fixed(pairElongation(event), 0)}° from the Sun.`;
+  const apart = look.separationDeg === null ? '' : `, ${angleWords(look.separationDeg)} apart then`;
+  return `From ${site.name}: ${lookWords(look, site.zone)} ${nightWords(look, site.zone)}${apart}.`;
+}
+
+const pairElongation = ({ circumstances }: MeetingMoment['event']): number =>
+  circumstances.about === 'two-bodies' ? circumstances.leastElongationDeg : 0;
+
+function NumbersOfAll({ moments, input }: { moments: readonly MeetingMoment[]; input: ReportInput }) {
+  const ofBoth = (moment: MeetingMoment, tell: (body: PairCircumstances['bodies'][0]) => string) =>
+    pairOf(moment).bodies.map(tell).join(', ');
+  return (
+    <Table
+      id="close-ups-table"
+      caption="The close-ups in numbers"
+      columns={[
+        {
+          title: 'Least separation',
+          cell: (moment) => (
+            <>
+              {pairOf(moment)
+                .bodies.map(({ body }) => titleOf(body))
+                .join(' and ')}
+              <br />
+              <span class="place">{dateAndClock(moment.event, zoneOf(input))}</span>
+            </>
+          ),
+        },
+        { title: 'Apart', cell: (moment) => angleWords(pairOf(moment).separationDeg) },
+        { title: 'Position angle', cell: (moment) => `${fixed(pairOf(moment).positionAngleDeg, 0)}°` },
+        {
+          title: 'Magnitudes',
+          cell: (moment) =>
+            ofBoth(moment, ({ magnitude }) => (magnitude === null ? '–' : fixed(magnitude, 1))),
+        },
+        {
+          title: 'Diameters',
+          cell: (moment) => ofBoth(moment, (body) => `${fixed(body.diameterArcsec, 1)}″`),
+        },
+        {
+          title: 'Lit',
+          cell: (moment) => ofBoth(moment, (body) => `${fixed(body.illuminatedFraction * 100, 0)} %`),
+        },
+        { title: 'From the Sun', cell: (moment) => `${fixed(pairOf(moment).leastElongationDeg, 0)}°` },
+      ]}
+      rows={moments}
+      keyOf={({ meeting }) => meeting.id}
+    />
+  );
 }

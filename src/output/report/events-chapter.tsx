@@ -1,122 +1,97 @@
 import type { ForecastEvent } from '../../forecast/index.js';
 import type { Site } from '../../sky/index.js';
-import { isoUtc, localDateTime, zoneAbbreviation } from '../../time/index.js';
-import { bodiesWords, circumstancesLine, kindTitles, seriesWords } from '../event-words.js';
-import { tellInstant, uncertaintyShort } from '../uncertainty-words.js';
+import { bodiesWords, kindTitles } from '../event-words.js';
+import { dateAndClock, uncertaintyShort } from '../uncertainty-words.js';
+import { Cautions } from './cautions.js';
+import { EventCell } from './event-cell.js';
+import { byMonth, eventRows } from './event-rows.js';
+import type { EventRow } from './event-rows.js';
+import { GeocentricCell, SitesCell } from './place-cells.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
 import { Table } from './table.js';
 import type { Column } from './table.js';
+import { WhenCell } from './when-cell.js';
 
 /** Every event, a table a month; those that no one on the Earth can see stand apart. */
 export function EventsChapter(input: ReportInput) {
   const zone = zoneOf(input);
-  const { events } = input.forecast;
-  const inTheSky = events.filter(({ circumstances }) => circumstances.about !== 'heliocentric');
-  const fromTheSun = events.filter(({ circumstances }) => circumstances.about === 'heliocentric');
+  const [home] = input.sites;
+  const rows = eventRows(input.forecast);
+  const months = byMonth(
+    rows.filter(({ event }) => !isFromTheSun(event)),
+    zone,
+  );
+  const fromTheSun = input.forecast.events.filter(isFromTheSun);
   return (
     <>
-      <p class="note" id="events-table">
-        Times are those of {input.sites[0]?.name ?? 'UTC'}; “how sure” is the interval that holds the instant
-        in 95 of 100 cases.
+      <p>
+        Dates and times are {home === undefined ? 'in UTC' : `those of the clocks at ${home.name}`}. The
+        interval behind each holds the true instant in 95 of 100 cases. The moments of one meeting of two
+        planets share a row.
       </p>
-      {byMonth(inTheSky, zone).map(([month, ofMonth]) => (
+      <Cautions {...input} />
+      <nav class="months" aria-label="Months">
+        <ul>
+          {months.map(({ id, title }) => (
+            <li key={id}>
+              <a href={`#month-${id}`}>{title}</a>
+            </li>
+          ))}
+        </ul>
+      </nav>
+      {months.map(({ id, title, rows: ofMonth }) => (
         <Table
-          key={month}
-          caption={month}
+          key={id}
+          class="events"
+          caption={<h3 id={`month-${id}`}>{title}</h3>}
           columns={columnsFor(zone, input.sites)}
           rows={ofMonth}
-          keyOf={({ id }) => id}
+          keyOf={({ event }) => event.id}
         />
       ))}
-      {fromTheSun.length === 0 ? null : (
-        <>
-          <h3>Line-ups as seen from the Sun</h3>
-          <Table
-            caption="Two planets at one heliocentric longitude, or opposite each other"
-            columns={columnsFor(zone, [])}
-            rows={fromTheSun}
-            keyOf={({ id }) => id}
-          />
-        </>
-      )}
+      {fromTheSun.length === 0 ? null : <FromTheSun events={fromTheSun} zone={zone} />}
     </>
   );
 }
 
-function byMonth(events: readonly ForecastEvent[], zone: string): [string, ForecastEvent[]][] {
-  const months = new Map<string, ForecastEvent[]>();
-  for (const event of events) {
-    const month = localDateTime(event.utc, zone).toFormat('LLLL yyyy');
-    months.set(month, [...(months.get(month) ?? []), event]);
-  }
-  return [...months];
-}
+const isFromTheSun = ({ circumstances }: ForecastEvent): boolean => circumstances.about === 'heliocentric';
 
-function columnsFor(zone: string, sites: readonly Site[]): Column<ForecastEvent>[] {
-  return [
-    { title: 'When, how sure', class: 'when', cell: (event) => <When event={event} zone={zone} /> },
-    { title: 'What', class: 'what', cell: (event) => <What event={event} /> },
-    ...(sites.length === 0
-      ? []
-      : [{ title: 'From here', cell: (event: ForecastEvent) => <FromSites event={event} sites={sites} /> }]),
-  ];
-}
+const columnsFor = (zone: string, sites: readonly Site[]): Column<EventRow>[] => [
+  { title: 'When, how sure', class: 'when', cell: ({ event }) => <WhenCell event={event} zone={zone} /> },
+  { title: 'What', class: 'what bare', cell: (row) => <EventCell row={row} zone={zone} /> },
+  sites.length === 0
+    ? { title: 'In the sky', cell: ({ event }) => <GeocentricCell event={event} /> }
+    : {
+        title: `From ${sites[0]!.name}`,
+        class: 'bare',
+        cell: ({ event }) => <SitesCell event={event} sites={sites} />,
+      },
+];
 
-function When({ event, zone }: { event: ForecastEvent; zone: string }) {
-  const { utc, uncertaintySeconds } = event;
-  const { isoDate, weekday, time } = tellInstant(utc, uncertaintySeconds.utc, zone);
+function FromTheSun({ events, zone }: { events: readonly ForecastEvent[]; zone: string }) {
   return (
-    <>
-      <time dateTime={isoUtc(utc)}>
-        {isoDate} {weekday}
-      </time>
-      <br />
-      {time === '' ? '' : `${time} ${zoneAbbreviation(utc, zone)} `}
-      <span class="place">{uncertaintyShort(uncertaintySeconds.utc)}</span>
-    </>
+    <Table
+      caption={<h3 id="from-the-sun">Line-ups as seen from the Sun</h3>}
+      columns={[
+        {
+          title: 'When, how sure',
+          cell: (event) => `${dateAndClock(event, zone)}, ${uncertaintyShort(event.uncertaintySeconds.utc)}`,
+        },
+        { title: 'What', class: 'bare', cell: (event) => `${bodiesWords(event)}, ${kindTitles[event.kind]}` },
+        {
+          title: 'Heliocentric longitudes',
+          class: 'number',
+          cell: ({ circumstances }) =>
+            circumstances.about === 'heliocentric'
+              ? circumstances.bodies
+                  .map(({ heliocentricLongitudeDeg }) => `${heliocentricLongitudeDeg.toFixed(1)}°`)
+                  .join(', ')
+              : '',
+        },
+      ]}
+      rows={events}
+      keyOf={({ id }) => id}
+    />
   );
-}
-
-function What({ event }: { event: ForecastEvent }) {
-  const series = seriesWords(event);
-  return (
-    <>
-      <strong>{bodiesWords(event)}</strong>, {kindTitles[event.kind]}
-      {series === null ? '' : `, ${series}`}
-      {event.certain ? '' : ' (grazing: another ephemeris may lack it)'}
-      <br />
-      <span class="place">{circumstancesLine(event)}</span>
-    </>
-  );
-}
-
-/** The home site in full; the partners that see it in a line each, those that do not in one together. */
-function FromSites({ event, sites }: { event: ForecastEvent; sites: readonly Site[] }) {
-  const [home, ...partners] = event.local.map((view, i) => ({ view, name: sites[i]!.name }));
-  const blind = partners.filter(({ view }) => view.bestLook === null);
-  return (
-    <ul>
-      <li>{home?.view.verdict}</li>
-      {partners
-        .filter(({ view }) => view.bestLook !== null)
-        .map(({ view, name }) => (
-          <li key={view.site}>
-            <span class="place">
-              {name}, {clockAt(event, view.zone)}:
-            </span>{' '}
-            {view.verdict}
-          </li>
-        ))}
-      {blind.length === 0 || home?.view.bestLook === null ? null : (
-        <li class="place">Not visible from {blind.map(({ name }) => name).join(' or ')}.</li>
-      )}
-    </ul>
-  );
-}
-
-function clockAt(event: ForecastEvent, zone: string): string {
-  const { time } = tellInstant(event.utc, event.uncertaintySeconds.utc, zone);
-  const date = localDateTime(event.utc, zone).toFormat('d LLL');
-  return time === '' ? date : `${date} ${time}`;
 }

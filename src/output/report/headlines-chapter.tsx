@@ -1,13 +1,14 @@
 import { titleOf } from '../../bodies/index.js';
 import type { ForecastEvent } from '../../forecast/index.js';
-import { isoUtc, localDateTime } from '../../time/index.js';
-import { bodiesWords, bodyCircumstancesOf, kindTitles } from '../event-words.js';
+import { isoUtc, localDateTime, zoneAbbreviation } from '../../time/index.js';
+import { bodiesWords, kindTitles } from '../event-words.js';
 import { headlineOf } from '../headline.js';
 import { angleWords } from '../numbers.js';
-import { uncertaintyWords } from '../uncertainty-words.js';
+import { tellInstant, uncertaintyWords } from '../uncertainty-words.js';
 import { headlineEvents } from './choose.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
+import { SkySign } from './sky-sign.js';
 
 export function HeadlinesChapter(input: ReportInput) {
   const zone = zoneOf(input);
@@ -15,7 +16,9 @@ export function HeadlinesChapter(input: ReportInput) {
   if (events.length === 0) return <p>Nothing in this span can be shown to the public from here.</p>;
   return (
     <>
-      <p>Each sentence may be printed as it stands. What cannot be seen from here is in the full table alone.</p>
+      <p>
+        Each sentence may be printed as it stands. What cannot be seen from here is in the full table alone.
+      </p>
       <ol class="headlines">
         {events.map((event) => (
           <li key={event.id}>
@@ -23,7 +26,7 @@ export function HeadlinesChapter(input: ReportInput) {
             <div>
               <h3>{titleFor(event)}</h3>
               <p>{headlineOf(event, zone)}</p>
-              <p class="note">{capitalised(uncertaintyWords(event.uncertaintySeconds.utc))}.</p>
+              <p class="note">{instantWords(event, zone)}.</p>
             </div>
           </li>
         ))}
@@ -34,32 +37,14 @@ export function HeadlinesChapter(input: ReportInput) {
 
 function DateAndSky({ event, zone }: { event: ForecastEvent; zone: string }) {
   const local = localDateTime(event.utc, zone);
-  const sky = skyOf(event);
   return (
     <p class="date">
       <time dateTime={isoUtc(event.utc)}>
-        {local.toFormat('d LLLL')} <span>{local.toFormat('yyyy')}</span>
+        {local.toFormat('d LLL')} <span>{local.toFormat('yyyy')}</span>
       </time>
-      {sky === null ? null : <span class={`sky ${sky}`}>{skyWords[sky]}</span>}
+      <SkySign event={event} />
     </p>
   );
-}
-
-type Sky = 'dusk' | 'dawn' | 'full';
-const skyWords: Readonly<Record<Sky, string>> = {
-  dusk: 'evening sky',
-  dawn: 'morning sky',
-  full: 'all night',
-};
-
-/** Farther from the Sun than this, a planet is up for most of the night. */
-const ALL_NIGHT_DEG = 135;
-
-function skyOf(event: ForecastEvent): Sky | null {
-  const [body] = bodyCircumstancesOf(event);
-  if (body === undefined) return null;
-  if (body.elongationDeg > ALL_NIGHT_DEG) return 'full';
-  return body.elongationSide === 'east' ? 'dusk' : 'dawn';
 }
 
 function titleFor(event: ForecastEvent): string {
@@ -69,4 +54,9 @@ function titleFor(event: ForecastEvent): string {
   return `${event.bodies.map(titleOf).join('')} at ${kindTitles[event.kind]}`;
 }
 
-const capitalised = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
+/** `Instant: 16:52 CET, ± 4 min`; where not even the hour is known, how many days the date may be off. */
+function instantWords({ utc, uncertaintySeconds }: ForecastEvent, zone: string): string {
+  const { time } = tellInstant(utc, uncertaintySeconds.utc, zone);
+  const sure = uncertaintyWords(uncertaintySeconds.utc);
+  return time === '' ? `Date: ${sure}` : `Instant: ${time} ${zoneAbbreviation(utc, zone)}, ${sure}`;
+}

@@ -25,13 +25,14 @@ export function Page({ title, lead, chapters }: PageProps) {
         <meta charset="utf-8" />
         <meta http-equiv="Content-Security-Policy" content={CONTENT_POLICY} />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
+        <meta name="color-scheme" content="light dark" />
         <meta name="generator" content="Synodos" />
         <title>{title}</title>
         {/* The style sheet is our own text; a browser reads it raw, so it is not escaped. */}
         <style dangerouslySetInnerHTML={{ __html: styles }} />
       </head>
       <body>
-        <a class="skip" href={`#${chapters[0]?.id ?? ''}`}>
+        <a class="skip" href="#content">
           To the content
         </a>
         <header>
@@ -47,7 +48,7 @@ export function Page({ title, lead, chapters }: PageProps) {
             </ul>
           </nav>
         </header>
-        <main>
+        <main id="content">
           {chapters.map(({ id, title: name, body, sheet }) => (
             <section key={id} aria-labelledby={id}>
               <h2 id={id} class={sheet === true ? 'sheet' : undefined}>

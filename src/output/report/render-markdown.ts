@@ -3,7 +3,7 @@ import { headlineOf } from '../headline.js';
 import { eventsMarkdown, markdownText } from '../markdown.js';
 import { headlineEvents } from './choose.js';
 import { methodWords } from './method-words.js';
-import { leadOf } from './render-report.js';
+import { leadOf } from './lead.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
 

@@ -1,10 +1,10 @@
-import { titleOf } from '../../bodies/index.js';
-import type { ResidualRow, ResidualSeries, Spread } from '../../forecast/index.js';
+import { cycleLabel } from '../../forecast/index.js';
+import type { ResidualRow, ResidualSeries } from '../../forecast/index.js';
 import { localDateTime } from '../../time/index.js';
 import { OcStems } from '../charts/index.js';
-import { kindTitles } from '../event-words.js';
-import { fixed, signed } from '../numbers.js';
+import { signed } from '../numbers.js';
 import type { ReportInput } from './report-input.js';
+import { findingOf, residualTitle, spreadWords, subjectOf } from './residual-words.js';
 import { Table } from './table.js';
 
 export function ResidualsChapter({ residuals }: ReportInput) {
@@ -15,6 +15,7 @@ export function ResidualsChapter({ residuals }: ReportInput) {
         last. The Kepler orbits let the planets run faster near the Sun. The ephemeris has the last word;
         these pictures show what it adds.
       </p>
+      <Spreads residuals={residuals} />
       {residuals.map((series) => (
         <Series key={idOf(series)} series={series} />
       ))}
@@ -24,16 +25,34 @@ export function ResidualsChapter({ residuals }: ReportInput) {
 
 const idOf = ({ kind, bodies }: ResidualSeries): string => `oc-${kind}-${bodies.join('-')}`;
 
+/** How far each first estimate falls from the refined instants, all series side by side. */
+function Spreads({ residuals }: Pick<ReportInput, 'residuals'>) {
+  return (
+    <Table<ResidualSeries>
+      caption="Misses of the first estimates: root mean square, and the worst"
+      columns={[
+        { title: 'Series', cell: (series) => subjectOf(series) },
+        { title: 'Events', class: 'number', cell: ({ rows }) => rows.length },
+        { title: 'Mean cycle', class: 'number', cell: ({ mean }) => spreadWords(mean) },
+        { title: 'Kepler, Table 1', class: 'number', cell: ({ keplerTable1 }) => spreadWords(keplerTable1) },
+        { title: 'Kepler, Table 2', class: 'number', cell: ({ keplerTable2 }) => spreadWords(keplerTable2) },
+      ]}
+      rows={residuals}
+      keyOf={idOf}
+    />
+  );
+}
+
 function Series({ series }: { series: ResidualSeries }) {
   const id = idOf(series);
-  const subject = `${series.bodies.map(titleOf).join(' and ')}, ${kindTitles[series.kind]}`;
-  const finding = `${subject}: ${missWords('the mean cycle', series.mean)}; ${missWords('the Kepler orbits', series.keplerTable1)}.`;
+  const subject = subjectOf(series);
+  const finding = findingOf(series);
   return (
     <>
       <OcStems
         id={id}
         series={series}
-        title={titleFor(series, subject)}
+        title={residualTitle(series)}
         finding={finding}
         tableId={`${id}-table`}
       />
@@ -45,11 +64,11 @@ function Series({ series }: { series: ResidualSeries }) {
           id={`${id}-table`}
           caption={`${finding}${series.beyondTable1 ? ' Some lie outside 1800–2050, for which Table 1 was made.' : ''}`}
           columns={[
-            { title: 'Cycle', class: 'number', cell: ({ event }) => signed(event.cycle, 0) },
             {
               title: 'Refined, UTC',
               cell: ({ event }) => localDateTime(event.utc, 'UTC').toFormat('yyyy-MM-dd HH:mm'),
             },
+            { title: 'Cycle', class: 'number', cell: ({ event }) => cycleLabel(event.cycle) },
             { title: 'Mean, d', class: 'number', cell: ({ meanDays }) => daysWords(meanDays, 2) },
             {
               title: 'Kepler Table 1, d',
@@ -72,20 +91,3 @@ function Series({ series }: { series: ResidualSeries }) {
 
 const daysWords = (days: number | null, digits: number): string =>
   days === null ? '–' : signed(days, digits);
-
-function titleFor(series: ResidualSeries, subject: string): string {
-  const [mean, kepler] = [series.mean, series.keplerTable1];
-  if (mean === null || kepler === null) return subject;
-  return `${subject}: the mean cycle is off by up to ${spanWords(mean.worstDays)}, the Kepler orbits by ${spanWords(kepler.worstDays)}`;
-}
-
-const missWords = (what: string, spread: Spread | null): string =>
-  spread === null
-    ? `${what} gives no date`
-    : `${what} misses by ${spanWords(spread.rmsDays)} rms and ${spanWords(spread.worstDays)} at worst`;
-
-function spanWords(days: number): string {
-  if (days >= 2) return `${fixed(days, days < 10 ? 1 : 0)} days`;
-  if (days * 24 >= 2) return `${fixed(days * 24, 0)} hours`;
-  return `${fixed(days * 1440, 0)} minutes`;
-}

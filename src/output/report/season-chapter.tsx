@@ -1,11 +1,11 @@
 import { titleOf } from '../../bodies/index.js';
 import type { SeasonState } from '../../forecast/index.js';
-import { localDateTime } from '../../time/index.js';
 import { SeasonRibbons } from '../charts/index.js';
 import { angleWords, fixed } from '../numbers.js';
 import { bestStretches, shownHours } from './best-stretches.js';
 import { HEADLINE_MEETING_DEG, headlineMeetings } from './choose.js';
 import type { ReportInput } from './report-input.js';
+import { Lines } from './lines.js';
 import { zoneOf } from './report-input.js';
 import { seasonTitle, stretchWords } from './season-words.js';
 import { Table } from './table.js';
@@ -51,22 +51,32 @@ export function SeasonChapter(input: ReportInput) {
         }
         columns={[
           { title: 'Planet', cell: ({ body }) => titleOf(body) },
-          { title: 'At its best', cell: (best) => stretchWords(best, zone) },
-          { title: 'Where', cell: ({ peak }) => stateWords[peak.state] },
+          {
+            title: 'At its best',
+            cell: ({ stretches }) => (
+              <Lines
+                lines={stretches.map((best) => `${stretchWords(best, zone)}, ${stateWords[best.peak.state]}`)}
+              />
+            ),
+          },
           home === undefined
             ? {
                 title: 'From the Sun',
                 class: 'number',
-                cell: ({ peak }) => angleWords(Math.abs(peak.elongationDeg)),
+                cell: ({ stretches }) => (
+                  <Lines lines={stretches.map(({ peak }) => angleWords(Math.abs(peak.elongationDeg)))} />
+                ),
               }
             : {
                 title: 'Hours in the dark, longest night',
                 class: 'number',
-                cell: ({ peak }) => fixed(shownHours(peak), 1),
+                cell: ({ stretches }) => (
+                  <Lines lines={stretches.map(({ peak }) => fixed(shownHours(peak), 1))} />
+                ),
               },
         ]}
-        rows={bests}
-        keyOf={({ body, peak }) => `${body} ${localDateTime(peak.utc, zone).toFormat('yyyy-MM-dd')}`}
+        rows={seasons.map((season) => ({ body: season.body, stretches: bestStretches(season) }))}
+        keyOf={({ body }) => body}
       />
     </>
   );

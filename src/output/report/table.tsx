@@ -8,34 +8,45 @@ export interface Column<Row> {
 
 interface TableProps<Row> {
   readonly id?: string;
-  readonly caption: string;
+  readonly class?: string;
+  readonly caption: ComponentChildren;
+  /** The first one names the row. */
   readonly columns: readonly Column<Row>[];
   readonly rows: readonly Row[];
   readonly keyOf: (row: Row) => string;
 }
 
-/** A table that becomes a list of cards on a phone: every cell then carries its column's name. */
-export function Table<Row>({ id, caption, columns, rows, keyOf }: TableProps<Row>) {
+/**
+ * A table that becomes a list of cards on a phone: every cell then carries its column's name. The roles are written
+ * out because browsers forget them where a style sheet lays a table out as blocks.
+ */
+export function Table<Row>({ id, class: name, caption, columns, rows, keyOf }: TableProps<Row>) {
   return (
-    <table class="stack" id={id}>
+    <table class={name === undefined ? 'stack' : `stack ${name}`} role="table" id={id}>
       <caption>{caption}</caption>
-      <thead>
-        <tr>
+      <thead role="rowgroup">
+        <tr role="row">
           {columns.map((column) => (
-            <th key={column.title} scope="col" class={column.class}>
+            <th key={column.title} scope="col" role="columnheader" class={column.class}>
               {column.title}
             </th>
           ))}
         </tr>
       </thead>
-      <tbody>
+      <tbody role="rowgroup">
         {rows.map((row) => (
-          <tr key={keyOf(row)}>
-            {columns.map((column) => (
-              <td key={column.title} class={column.class} data-label={column.title}>
-                {column.cell(row)}
-              </td>
-            ))}
+          <tr key={keyOf(row)} role="row">
+            {columns.map((column, i) =>
+              i === 0 ? (
+                <th key={column.title} scope="row" role="rowheader" class={column.class}>
+                  {column.cell(row)}
+                </th>
+              ) : (
+                <td key={column.title} role="cell" class={column.class} data-label={column.title}>
+                  {column.cell(row)}
+                </td>
+              ),
+            )}
           </tr>
         ))}
       </tbody>
