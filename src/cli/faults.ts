@@ -16,6 +16,11 @@ export class Faults {
     return undefined;
   }
 
+  /** Notes what another reader has found wrong. */
+  include({ faults }: UsageError): void {
+    this.#lines.push(...faults);
+  }
+
   /** Throws what was gathered, if anything was. */
   throwIfAny(): void {
     if (this.#lines.length > 0) throw new UsageError(this.#lines);

@@ -3,6 +3,7 @@ import { SiteError, makeSite } from '../sky/index.js';
 import type { Site } from '../sky/index.js';
 import type { Faults } from './faults.js';
 import { readNumber } from './read-number.js';
+import { UsageError } from './usage-error.js';
 
 export interface SiteOptions {
   readonly site?: string;
@@ -21,7 +22,8 @@ export async function readSite(options: SiteOptions, faults: Faults): Promise<Si
       faults.add('--plan', 'stands alone: name one of its sites with --site ID');
     return undefined;
   }
-  if (!/^[\s\d+-][\s\d.,+-]*$/.test(options.site)) return siteOfPlan(options.site, options, faults);
+  // No id holds a comma.
+  if (!options.site.includes(',')) return siteOfPlan(options.site, options, faults);
   if (options.plan !== undefined)
     faults.add('--plan', 'goes with the id of a site: coordinates need no plan');
   return siteOfCoordinates(options.site, options.zone, faults);
@@ -61,8 +63,8 @@ async function siteOfPlan(id: string, options: SiteOptions, faults: Faults): Pro
     faults.add('--site', `${quoted(id)} is not a place: ${COORDINATES}`);
     return undefined;
   }
-  const { planFrom } = await import('./plan-from.js');
-  const { sites } = await planFrom(options.plan);
+  const sites = await sitesOfPlan(options.plan, faults);
+  if (sites === undefined) return undefined;
   const site = sites.find((candidate) => candidate.id === id);
   if (site !== undefined) return site;
   const ids = sites.map((candidate) => candidate.id);
@@ -71,4 +73,16 @@ async function siteOfPlan(id: string, options: SiteOptions, faults: Faults): Pro
     `${quoted(id)} is the id of no site of ${options.plan}.${ids.length === 0 ? ' It has none' : oneOf(id, ids)}`,
   );
   return undefined;
+}
+
+/** The sites of a plan; undefined where the plan has faults, which are noted beside those of the command line. */
+async function sitesOfPlan(file: string, faults: Faults): Promise<readonly Site[] | undefined> {
+  const { planFrom } = await import('./plan-from.js');
+  try {
+    return (await planFrom(file)).sites;
+  } catch (fault) {
+    if (!(fault instanceof UsageError)) throw fault;
+    faults.include(fault);
+    return undefined;
+  }
 }

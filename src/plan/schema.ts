@@ -25,7 +25,17 @@ const checked = (text: z.ZodString, problemOf: (word: string) => string | null) 
 
 const problemIn = <T>(reading: Reading<T>): string | null => ('problem' in reading ? reading.problem : null);
 
-const text = (most: number) => z.string().trim().min(1).max(most);
+/** A text on one line. Control characters are meant for terminals, and no output could show them. */
+const text = (most: number) =>
+  checked(
+    z
+      .string()
+      .trim()
+      .overwrite((word) => word.replace(/\s+/g, ' '))
+      .min(1)
+      .max(most),
+    (word) => (/\p{Cc}/u.test(word) ? `${quoted(word)} holds a control character: remove it` : null),
+  );
 
 /** Spans are read again with their zone once the home site is known; here only the form counts. */
 const instant = checked(z.string('write a date like 2027-01-31'), (word) =>

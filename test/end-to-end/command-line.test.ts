@@ -212,6 +212,34 @@ describe('a bad plan file', () => {
   });
 });
 
+describe('a bad plan named beside --site', () => {
+  it('is told together with what is wrong with the command line', () => {
+    const { status, stderr } = synodos(
+      [
+        'events',
+        '--from',
+        'today',
+        '--to',
+        '2027-04-01',
+        '--site',
+        '1',
+        '--plan',
+        'bad.yaml',
+        '--format',
+        'xml',
+      ],
+      { cwd: folder },
+    );
+    expect(
+      stderr
+        .trimEnd()
+        .split('\n')
+        .map((line) => line.split(' ')[0]),
+    ).toEqual(['bad.yaml:1:1:', 'bad.yaml:1:1:', 'bad.yaml:2:31:', '--from:', '--format:']);
+    expect(status).toBe(2);
+  });
+});
+
 describe('an output folder that cannot be', () => {
   it('is named with what to do instead', () => {
     const { status, stderr } = synodos(

@@ -87,6 +87,8 @@ describe.each(NAMES.map((name, i) => [name, i] as const))('the name %j', (name, 
       'report.md',
       'residuals.csv',
     ]);
-    expect(JSON.parse(outputOf(i, 'manifest.json'))).toMatchObject({ title: name.trim() });
+    expect(JSON.parse(outputOf(i, 'manifest.json'))).toMatchObject({
+      title: name.replace(/\s+/g, ' ').trim(),
+    });
   });
 });

@@ -150,6 +150,14 @@ export const badPlans: readonly BadPlan[] = [
     ],
   },
   {
+    what: 'control characters in a title and in a name',
+    text: 'title: "T\\e[31m"\nspan: { from: 2027-01-01, to: 2028-01-01 }\nsites: [{ id: a, name: "\\a", latitude: 48, longitude: 11 }]\n',
+    lines: [
+      'p.yaml:1:8: title: "T\uFFFD[31m" holds a control character: remove it',
+      'p.yaml:3:24: sites[0].name: "\uFFFD" holds a control character: remove it',
+    ],
+  },
+  {
     what: 'a backward span beside other faults (cross checks run all the same)',
     text: 'titel: T\nspan: { from: 2028-01-01, to: 2027-01-01 }\n',
     lines: [

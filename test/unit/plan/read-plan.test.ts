@@ -34,6 +34,11 @@ describe('a bad plan', () => {
 });
 
 describe('a plan', () => {
+  it('has its texts on one line each', () => {
+    const text = 'title: "two\\nlines\\tof\\r\\n it"\nspan: { from: 2027-01-01, to: 2028-01-01 }\n';
+    expect(readPlan(text)).toMatchObject({ plan: { title: 'two lines of it' } });
+  });
+
   it('may end a moment after midnight has come to its home', () => {
     const text =
       'title: T\nspan: { from: 2027-01-01, to: 2027-01-01T03:01Z }\nsites: [{ id: a, latitude: -31, longitude: -70, zone: America/Santiago }]\n';
