@@ -4,4 +4,3 @@ export { loadPlan } from './load-plan.js';
 export type { Plan, ResidualWish } from './plan.js';
 export { readPlan } from './read-plan.js';
 export type { PlanReading } from './read-plan.js';
-export { runPlan } from './run-plan.js';

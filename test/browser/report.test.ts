@@ -6,8 +6,9 @@ import { pathToFileURL } from 'node:url';
 import { chromium } from 'playwright-core';
 import type { Browser, BrowserContextOptions, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { loadPlan, runPlan } from '../../src/plan/index.js';
+import { loadPlan } from '../../src/plan/index.js';
 import { writeOutputs } from '../../src/plan/files/index.js';
+import { runPlan } from '../../src/plan/run/index.js';
 import { findChromium } from './find-chromium.js';
 
 const executablePath = findChromium();

@@ -1,5 +1,5 @@
 import { readyFolder, writeOutputs } from '../../plan/files/index.js';
-import { runPlan } from '../../plan/index.js';
+import { runPlan } from '../../plan/run/index.js';
 import { planFrom } from '../plan-from.js';
 import { withProgress } from '../progress.js';
 import { zoneNotes } from '../zone-notes.js';

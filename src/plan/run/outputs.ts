@@ -1,8 +1,8 @@
-import { eventsCsv, eventsJson, residualsCsv } from '../output/index.js';
-import { eventsCalendar } from '../output/calendar/index.js';
-import { renderReport, renderReportMarkdown } from '../output/report/index.js';
-import type { ReportInput } from '../output/report/index.js';
-import type { UtcMillis } from '../time/index.js';
+import { eventsCsv, eventsJson, residualsCsv } from '../../output/index.js';
+import { eventsCalendar } from '../../output/calendar/index.js';
+import { renderReport, renderReportMarkdown } from '../../output/report/index.js';
+import type { ReportInput } from '../../output/report/index.js';
+import type { UtcMillis } from '../../time/index.js';
 
 /** All that a plan's run found: what every output is made of. */
 export interface PlanResults extends ReportInput {

@@ -1,8 +1,8 @@
-import { skyPlanets } from '../bodies/index.js';
-import { forecast, residuals, seasonsOf } from '../forecast/index.js';
-import type { OutputFile } from './files/index.js';
+import { skyPlanets } from '../../bodies/index.js';
+import { forecast, residuals, seasonsOf } from '../../forecast/index.js';
+import type { OutputFile } from '../files/index.js';
 import { outputs } from './outputs.js';
-import type { Plan } from './plan.js';
+import type { Plan } from '../plan.js';
 
 /** How much of a run is done after each step, by measure on the demo plan; the outputs take the rest. */
 const DONE = { forecast: 0.4, residuals: 0.5, seasons: 0.6 } as const;

@@ -1,0 +1,1 @@
+export { runPlan } from './run-plan.js';
