@@ -23,7 +23,6 @@ await build({
   chunkNames: 'chunks/[name]-[hash]',
   // A command that answers at once is read at once: half the bytes are a third of the start-up.
   minify: true,
-  keepNames: true,
   legalComments: 'linked',
 });
 

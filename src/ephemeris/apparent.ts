@@ -28,6 +28,8 @@ export interface Observer {
 export class ApparentPlaces {
   private computed = 0;
   private lastObserver: Observer | null = null;
+  /** The circumstances of an event ask for one place in several frames. */
+  private readonly lastPlaces = new Map<Body, { readonly tt: TtDays; readonly place: Vector }>();
 
   constructor(private readonly geometry: Geometry) {}
 
@@ -82,7 +84,15 @@ export class ApparentPlaces {
    * From the Earth now to the body when the light left it. Both are taken from the barycentre by letting the Sun move
    * evenly in the meantime, which is true to 30 m in the light-time of Neptune.
    */
-  private retarded(body: Body, { tt, earthFromSun, sunVelocity }: Observer): Vector {
+  private retarded(body: Body, observer: Observer): Vector {
+    const last = this.lastPlaces.get(body);
+    if (last?.tt === observer.tt) return last.place;
+    const place = this.retard(body, observer);
+    this.lastPlaces.set(body, { tt: observer.tt, place });
+    return place;
+  }
+
+  private retard(body: Body, { tt, earthFromSun, sunVelocity }: Observer): Vector {
     let lightTimeDays = 0;
     let place = earthFromSun;
     for (let step = 0; step < MAX_LIGHT_TIME_STEPS; step++) {

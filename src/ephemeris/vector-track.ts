@@ -11,6 +11,11 @@ export interface BlockShape {
   readonly nodes: number;
 }
 
+/** A coefficient smaller than this part of the largest is rounding noise: 0.0000001″. */
+const NEGLIGIBLE = 5e-13;
+/** Enough for a second derivative that changes. */
+const FEWEST_TERMS = 5;
+
 /** The Chebyshev coefficients of block `index`: those of x, then of y, then of z. */
 export type Blocks = (index: number) => Float64Array;
 
@@ -33,27 +38,29 @@ export class VectorTrack {
   }
 
   position(tt: TtDays): Vector {
-    const { blockDays, nodes } = this.shape;
+    const { blockDays } = this.shape;
     const index = Math.floor(tt / blockDays);
     const x = (tt - index * blockDays) * this.perDay - 1;
     const block = this.blockAt(index);
+    const terms = block.length / 3;
     return {
-      x: chebyshevValue(block, 0, nodes, x),
-      y: chebyshevValue(block, nodes, nodes, x),
-      z: chebyshevValue(block, 2 * nodes, nodes, x),
+      x: chebyshevValue(block, 0, terms, x),
+      y: chebyshevValue(block, terms, terms, x),
+      z: chebyshevValue(block, 2 * terms, terms, x),
     };
   }
 
   motion(tt: TtDays): Motion {
-    const { blockDays, nodes } = this.shape;
+    const { blockDays } = this.shape;
     const { perDay } = this;
     const index = Math.floor(tt / blockDays);
     const x = (tt - index * blockDays) * perDay - 1;
     const block = this.blockAt(index);
+    const terms = block.length / 3;
     const [jx, jy, jz] = this.jets;
-    evaluateChebyshev(block, 0, nodes, x, jx);
-    evaluateChebyshev(block, nodes, nodes, x, jy);
-    evaluateChebyshev(block, 2 * nodes, nodes, x, jz);
+    evaluateChebyshev(block, 0, terms, x, jx);
+    evaluateChebyshev(block, terms, terms, x, jy);
+    evaluateChebyshev(block, 2 * terms, terms, x, jz);
     const perDay2 = perDay * perDay;
     return {
       position: { x: jx.value, y: jy.value, z: jz.value },
@@ -68,13 +75,14 @@ export class VectorTrack {
 
   /** The vector's longitude about the z axis, radians in (−π, π], with its derivatives. */
   longitude(tt: TtDays): Jet {
-    const { blockDays, nodes } = this.shape;
+    const { blockDays } = this.shape;
     const index = Math.floor(tt / blockDays);
     const x = (tt - index * blockDays) * this.perDay - 1;
     const block = this.blockAt(index);
+    const terms = block.length / 3;
     const [jx, jy] = this.jets;
-    evaluateChebyshev(block, 0, nodes, x, jx);
-    evaluateChebyshev(block, nodes, nodes, x, jy);
+    evaluateChebyshev(block, 0, terms, x, jx);
+    evaluateChebyshev(block, terms, terms, x, jy);
     return longitudeOf(jx, jy, this.perDay);
   }
 }
@@ -98,8 +106,10 @@ export class BlockFit {
   private readonly xs: Float64Array;
   private readonly ys: Float64Array;
   private readonly zs: Float64Array;
+  private readonly fitted: Float64Array;
 
   constructor(private readonly nodes: number) {
+    this.fitted = new Float64Array(3 * nodes);
     this.xs = new Float64Array(nodes);
     this.ys = new Float64Array(nodes);
     this.zs = new Float64Array(nodes);
@@ -111,11 +121,21 @@ export class BlockFit {
     this.zs[node] = z;
   }
 
+  /** As many terms as matter: the farther and slower the body, the fewer. */
   coefficients(): Float64Array {
-    const block = new Float64Array(3 * this.nodes);
-    fitChebyshev(this.xs, block, 0);
-    fitChebyshev(this.ys, block, this.nodes);
-    fitChebyshev(this.zs, block, 2 * this.nodes);
+    const { nodes, fitted } = this;
+    fitChebyshev(this.xs, fitted, 0);
+    fitChebyshev(this.ys, fitted, nodes);
+    fitChebyshev(this.zs, fitted, 2 * nodes);
+    const largest = fitted.reduce((most, c) => Math.max(most, Math.abs(c)), 0);
+    const matters = (j: number): boolean =>
+      [0, nodes, 2 * nodes].some((axis) => Math.abs(fitted[axis + j]!) > NEGLIGIBLE * largest);
+    let terms = nodes;
+    while (terms > FEWEST_TERMS && !matters(terms - 1)) terms--;
+    const block = new Float64Array(3 * terms);
+    for (let axis = 0; axis < 3; axis++) {
+      block.set(fitted.subarray(axis * nodes, axis * nodes + terms), axis * terms);
+    }
     return block;
   }
 }

@@ -23,16 +23,23 @@ const toDigits = (value: number | null, digits: number): number | null =>
 
 /** The forecast as JSON, by `data/events.schema.json`. Ends with a newline. */
 export function eventsJson(forecast: Forecast, sites: readonly Site[]): string {
-  const document = {
-    schema: EVENTS_SCHEMA,
-    span: { from: isoUtc(forecast.from), to: isoUtc(forecast.to) },
-    source: forecast.source,
-    bodies: forecast.bodies,
-    sites: sites.map(siteJson),
-    events: forecast.events.map(eventJson),
-    meetings: forecast.meetings.map(meetingJson),
-  };
-  return `${JSON.stringify(document, null, 1)}\n`;
+  return [
+    '{',
+    `"schema": ${JSON.stringify(EVENTS_SCHEMA)},`,
+    `"span": ${JSON.stringify({ from: isoUtc(forecast.from), to: isoUtc(forecast.to) })},`,
+    `"source": ${JSON.stringify(forecast.source)},`,
+    `"bodies": ${JSON.stringify(forecast.bodies)},`,
+    `"sites": ${linePerItem(sites, siteJson)},`,
+    `"events": ${linePerItem(forecast.events, eventJson)},`,
+    `"meetings": ${linePerItem(forecast.meetings, meetingJson)}`,
+    '}',
+    '',
+  ].join('\n');
+}
+
+/** An array with an item a line: two forecasts can be compared line by line, and a century stays small. */
+function linePerItem<Item>(items: readonly Item[], shape: (item: Item) => unknown): string {
+  return items.length === 0 ? '[]' : `[\n${items.map((item) => JSON.stringify(shape(item))).join(',\n')}\n]`;
 }
 
 const siteJson = (site: Site) => ({

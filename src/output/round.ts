@@ -1,5 +1,8 @@
 /** Rounded to a number of decimals, as a number: no false precision, and the same bytes everywhere. */
-export const rounded = (value: number, digits: number): number => Number(value.toFixed(digits));
+export function rounded(value: number, digits: number): number {
+  const scale = 10 ** digits;
+  return Math.round(value * scale) / scale + 0;
+}
 
 /** How many digits each quantity deserves: a little beyond what the best source knows, and no more. */
 export const round = {

@@ -18,7 +18,7 @@ import { handWrittenScan } from './hand-written-scan.js';
 const CENTURY = { from: ttDays(-18_262.5), to: ttDays(18_262.5) };
 const DECADE = { from: ttDays(0), to: ttDays(3652.5) };
 const ROUNDS = 5;
-const COMMAND = new URL('../../dist/cli.js', import.meta.url).pathname;
+const COMMAND = 'dist/cli.js';
 
 const say = (line: string): void => {
   process.stdout.write(`${line}\n`);
@@ -48,8 +48,7 @@ function searchAll(span: typeof CENTURY): number {
 function placesPerAlignment(): { mean: number; most: number; events: number } {
   const counts: number[] = [];
   for (const kind of kinds.filter(
-    ({ errors, search: method, exactValue }) =>
-      errors.name === 'differenceErrors' && method === 'one-a-cycle' && exactValue !== null,
+    ({ circumstances, search: method }) => circumstances === 'one-body' && method === 'one-a-cycle',
   )) {
     for (const subject of kind.subjects(majorPlanets)) {
       const sky = trackedSky(librarySource);
