@@ -9,9 +9,10 @@ const WIDTH = 320;
 const RADIUS = 112;
 const CENTRE = { x: WIDTH / 2, y: RADIUS + 22 };
 const SCALE_Y = CENTRE.y + RADIUS + 16;
-/** The discs as a telescope shows them, below the field, all close-ups at one scale. */
+/** The discs as a telescope shows them, below the field: the larger one fills the room, but small ones stay small. */
 const DISCS_Y = SCALE_Y + 54;
-const DISC_PIXELS_PER_ARCSEC = 1.1;
+const LARGEST_DISC_PX = 48;
+const MOST_PIXELS_PER_ARCSEC = 2.2;
 const HEIGHT = DISCS_Y + 58;
 const SMALLEST_DISC_PX = 4;
 /** Fields that people look through: a telescope's at high and low power, large and small binoculars. */
@@ -36,6 +37,10 @@ export const fieldFor = (separationDeg: number): number =>
 export function CloseUp({ id, pair, title, finding, legend, tableId }: CloseUpProps) {
   const fieldDeg = fieldFor(pair.separationDeg);
   const pixelsPerDeg = (2 * RADIUS) / fieldDeg;
+  const pixelsPerArcsec = Math.min(
+    MOST_PIXELS_PER_ARCSEC,
+    LARGEST_DISC_PX / Math.max(...pair.bodies.map(({ diameterArcsec }) => diameterArcsec)),
+  );
   const angle = (pair.positionAngleDeg * Math.PI) / 180;
   // From the first body to the second: north is up, and position angle turns through east, which is left.
   const [east, north] = [Math.sin(angle) * pair.separationDeg, Math.cos(angle) * pair.separationDeg];
@@ -58,11 +63,11 @@ export function CloseUp({ id, pair, title, finding, legend, tableId }: CloseUpPr
         east
       </text>
       <Drift />
-      <InField body={pair.bodies[0]} at={place(-0.5)} pixelsPerDeg={pixelsPerDeg} />
-      <InField body={pair.bodies[1]} at={place(0.5)} pixelsPerDeg={pixelsPerDeg} />
+      <InField body={pair.bodies[0]} at={place(-0.5)} pixelsPerDeg={pixelsPerDeg} isUpper={north < 0} />
+      <InField body={pair.bodies[1]} at={place(0.5)} pixelsPerDeg={pixelsPerDeg} isUpper={north >= 0} />
       <ScaleBar pixelsPerDeg={pixelsPerDeg} />
-      <Enlarged body={pair.bodies[0]} x={WIDTH * 0.27} />
-      <Enlarged body={pair.bodies[1]} x={WIDTH * 0.73} />
+      <Enlarged body={pair.bodies[0]} x={WIDTH * 0.27} pixelsPerArcsec={pixelsPerArcsec} />
+      <Enlarged body={pair.bodies[1]} x={WIDTH * 0.73} pixelsPerArcsec={pixelsPerArcsec} />
     </Figure>
   );
 }
@@ -76,21 +81,17 @@ interface InFieldProps {
   readonly body: BodyCircumstances;
   readonly at: Point;
   readonly pixelsPerDeg: number;
+  readonly isUpper: boolean;
 }
 
-/** At true size where that can be seen, else a point. */
-function InField({ body, at, pixelsPerDeg }: InFieldProps) {
+/** At true size where that can be seen, else a point; the upper body's name above it, the lower one's below. */
+function InField({ body, at, pixelsPerDeg, isUpper }: InFieldProps) {
   const diameter = (body.diameterArcsec / 3600) * pixelsPerDeg;
   const radius = Math.max(SMALLEST_DISC_PX, diameter) / 2;
-  const right = at.x > CENTRE.x;
   return (
     <g>
       <circle cx={px(at.x)} cy={px(at.y)} r={px(radius)} class="point" />
-      <text
-        x={px(at.x + (right ? -1 : 1) * (radius + 7))}
-        y={px(at.y + 4)}
-        class={right ? 'end name inside' : 'name inside'}
-      >
+      <text x={px(at.x)} y={px(isUpper ? at.y - radius - 8 : at.y + radius + 17)} class="middle name inside">
         {titleOf(body.body)}
       </text>
     </g>
@@ -120,8 +121,14 @@ function ScaleBar({ pixelsPerDeg }: { pixelsPerDeg: number }) {
   );
 }
 
-/** A disc at the common scale, with its size and how much of it is lit. */
-function Enlarged({ body, x }: { body: BodyCircumstances; x: number }) {
+interface EnlargedProps {
+  readonly body: BodyCircumstances;
+  readonly x: number;
+  readonly pixelsPerArcsec: number;
+}
+
+/** A disc at the scale of both, with its size and how much of it is lit. */
+function Enlarged({ body, x, pixelsPerArcsec }: EnlargedProps) {
   const { diameterArcsec, illuminatedFraction } = body;
   return (
     <g>
@@ -129,7 +136,7 @@ function Enlarged({ body, x }: { body: BodyCircumstances; x: number }) {
         body={body}
         x={x}
         y={DISCS_Y}
-        radius={Math.max(1, (diameterArcsec * DISC_PIXELS_PER_ARCSEC) / 2)}
+        radius={Math.max(1, (diameterArcsec * pixelsPerArcsec) / 2)}
       />
       <text x={x} y={DISCS_Y + 38} class="middle name">
         {titleOf(body.body)}

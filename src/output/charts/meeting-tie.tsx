@@ -1,26 +1,18 @@
-import type { Meeting } from '../../forecast/index.js';
-import { utcFromTt } from '../../time/index.js';
-import { angleWords } from '../numbers.js';
 import { px } from './px.js';
-import type { TimeScale } from './time-axis.js';
+import type { Tied, WordsPlace } from './tie-words.js';
 
 interface MeetingTieProps {
-  readonly meeting: Meeting;
-  readonly x: TimeScale;
-  /** The threads of its two planets. */
-  readonly threads: readonly [number, number];
+  readonly tied: Tied;
+  /** How near the two come. */
+  readonly words: string;
+  readonly wordsAt: WordsPlace;
+  /** The end of the axis, px: near it the arc bulges the other way. */
+  readonly right: number;
 }
 
-/** Room that half of the separation's words needs, px. */
-const WORD_ROOM = 18;
-
 /** An arc that ties two ribbons where their planets meet, with how near they come. */
-export function MeetingTie({ meeting, x, threads }: MeetingTieProps) {
-  const at = x(utcFromTt(meeting.closestTt));
-  const [upper, lower] = [Math.min(...threads), Math.max(...threads)];
+export function MeetingTie({ tied: { at, upper, lower }, words, wordsAt, right }: MeetingTieProps) {
   const bulge = 9 + (lower - upper) * 0.06;
-  const right = x.range()[1]!;
-  // Near the right edge of the picture the arc bulges the other way.
   const side = at + bulge > right ? -1 : 1;
   return (
     <g class="tie">
@@ -29,8 +21,8 @@ export function MeetingTie({ meeting, x, threads }: MeetingTieProps) {
       />
       <circle cx={px(at)} cy={upper} r={3.2} />
       <circle cx={px(at)} cy={lower} r={3.2} />
-      <text x={px(Math.min(at, right - WORD_ROOM))} y={upper - 12} class="word middle">
-        {angleWords(meeting.leastSeparationDeg)}
+      <text x={px(wordsAt.x)} y={wordsAt.y} class="word middle">
+        {words}
       </text>
     </g>
   );

@@ -2,11 +2,14 @@ import { scaleLinear } from 'd3-scale';
 import { titleOf } from '../../bodies/index.js';
 import type { SkyPlanet } from '../../bodies/index.js';
 import type { Forecast, Meeting, Season } from '../../forecast/index.js';
+import { utcFromTt } from '../../time/index.js';
+import { angleWords } from '../numbers.js';
 import { Figure, GUTTER_WIDTH, PLOT_WIDTH } from './figure.js';
 import { MeetingTie } from './meeting-tie.js';
 import { Ribbon, reachAt } from './ribbon.js';
 import { SeasonKey } from './season-key.js';
 import { SeasonMark, isMarked } from './season-marks.js';
+import { placesOfWords } from './tie-words.js';
 import { TimeAxis, timeTicks } from './time-axis.js';
 
 const TOP = 34;
@@ -45,6 +48,13 @@ export function SeasonRibbons(props: SeasonRibbonsProps) {
   const threadOf = (body: SkyPlanet): number =>
     TOP + (seasons.findIndex((season) => season.body === body) + 0.5) * ROW_HEIGHT;
   const shown = new Set(seasons.map(({ body }) => body));
+  const right = PLOT_WIDTH - 1;
+  const ties = meetings.filter(({ bodies }) => bodies.every((body) => shown.has(body)));
+  const tied = ties.map(({ bodies, closestTt }) => {
+    const threads = bodies.map(threadOf);
+    return { at: x(utcFromTt(closestTt)), upper: Math.min(...threads), lower: Math.max(...threads) };
+  });
+  const wordsAt = placesOfWords(tied, right);
   return (
     <Figure
       id="season"
@@ -67,16 +77,15 @@ export function SeasonRibbons(props: SeasonRibbonsProps) {
       {seasons.map((season) => (
         <Ribbon key={season.body} season={season} scale={scale} middle={threadOf(season.body)} />
       ))}
-      {meetings
-        .filter(({ bodies }) => bodies.every((body) => shown.has(body)))
-        .map((meeting) => (
-          <MeetingTie
-            key={meeting.id}
-            meeting={meeting}
-            x={x}
-            threads={[threadOf(meeting.bodies[0]), threadOf(meeting.bodies[1])]}
-          />
-        ))}
+      {ties.map((meeting, i) => (
+        <MeetingTie
+          key={meeting.id}
+          tied={tied[i]!}
+          words={angleWords(meeting.leastSeparationDeg)}
+          wordsAt={wordsAt[i]!}
+          right={right}
+        />
+      ))}
       {seasons.flatMap((season) =>
         forecast.events
           .filter((event) => event.bodies.length === 1 && event.bodies[0] === season.body && isMarked(event))

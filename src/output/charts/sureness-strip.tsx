@@ -1,5 +1,5 @@
 import { scaleLog } from 'd3-scale';
-import { Figure, PLOT_WIDTH } from './figure.js';
+import { COLUMN_WIDTH, Figure } from './figure.js';
 import { px } from './px.js';
 
 /** How sure the dates of one kind are. */
@@ -17,8 +17,8 @@ interface SurenessStripProps {
   readonly tableId: string;
 }
 
-const LABELS = 226;
-const WIDTH = PLOT_WIDTH + 76;
+const LABELS = 248;
+const WIDTH = COLUMN_WIDTH;
 const TOP = 26;
 const ROW_HEIGHT = 22;
 const TICKS = [

@@ -41,14 +41,16 @@ export function EventsChapter(input: ReportInput) {
         </ul>
       </nav>
       {months.map(({ id, title, rows: ofMonth }) => (
-        <Table
-          key={id}
-          class="events"
-          caption={<h3 id={`month-${id}`}>{title}</h3>}
-          columns={columnsFor(zone, input.sites)}
-          rows={ofMonth}
-          keyOf={({ event }) => event.id}
-        />
+        <section key={id} aria-labelledby={`month-${id}`}>
+          <h3 id={`month-${id}`}>{title}</h3>
+          <Table
+            class="events"
+            labelledBy={`month-${id}`}
+            columns={columnsFor(zone, input.sites)}
+            rows={ofMonth}
+            keyOf={({ event }) => event.id}
+          />
+        </section>
       ))}
       {fromTheSun.length === 0 ? null : <FromTheSun events={fromTheSun} zone={zone} />}
     </>
@@ -71,27 +73,35 @@ const columnsFor = (zone: string, sites: readonly Site[]): Column<EventRow>[] =>
 
 function FromTheSun({ events, zone }: { events: readonly ForecastEvent[]; zone: string }) {
   return (
-    <Table
-      caption={<h3 id="from-the-sun">Line-ups as seen from the Sun</h3>}
-      columns={[
-        {
-          title: 'When, how sure',
-          cell: (event) => `${dateAndClock(event, zone)}, ${uncertaintyShort(event.uncertaintySeconds.utc)}`,
-        },
-        { title: 'What', class: 'bare', cell: (event) => `${bodiesWords(event)}, ${kindTitles[event.kind]}` },
-        {
-          title: 'Heliocentric longitudes',
-          class: 'number',
-          cell: ({ circumstances }) =>
-            circumstances.about === 'heliocentric'
-              ? circumstances.bodies
-                  .map(({ heliocentricLongitudeDeg }) => `${heliocentricLongitudeDeg.toFixed(1)}°`)
-                  .join(', ')
-              : '',
-        },
-      ]}
-      rows={events}
-      keyOf={({ id }) => id}
-    />
+    <section aria-labelledby="from-the-sun">
+      <h3 id="from-the-sun">Line-ups as seen from the Sun</h3>
+      <Table
+        labelledBy="from-the-sun"
+        columns={[
+          {
+            title: 'When, how sure',
+            cell: (event) =>
+              `${dateAndClock(event, zone)}, ${uncertaintyShort(event.uncertaintySeconds.utc)}`,
+          },
+          {
+            title: 'What',
+            class: 'bare',
+            cell: (event) => `${bodiesWords(event)}, ${kindTitles[event.kind]}`,
+          },
+          {
+            title: 'Heliocentric longitudes',
+            class: 'number',
+            cell: ({ circumstances }) =>
+              circumstances.about === 'heliocentric'
+                ? circumstances.bodies
+                    .map(({ heliocentricLongitudeDeg }) => `${heliocentricLongitudeDeg.toFixed(1)}°`)
+                    .join(', ')
+                : '',
+          },
+        ]}
+        rows={events}
+        keyOf={({ id }) => id}
+      />
+    </section>
   );
 }

@@ -1,5 +1,5 @@
 import { titleOf } from '../../bodies/index.js';
-import type { SeasonState } from '../../forecast/index.js';
+import type { SeasonSample, SeasonState } from '../../forecast/index.js';
 import { SeasonRibbons } from '../charts/index.js';
 import { angleWords, fixed } from '../numbers.js';
 import { bestStretches, shownHours } from './best-stretches.js';
@@ -55,25 +55,10 @@ export function SeasonChapter(input: ReportInput) {
             title: 'At its best',
             cell: ({ stretches }) => (
               <Lines
-                lines={stretches.map((best) => `${stretchWords(best, zone)}, ${stateWords[best.peak.state]}`)}
+                lines={stretches.map((best) => `${stretchWords(best, zone)}, ${peakWords(best.peak)}`)}
               />
             ),
           },
-          home === undefined
-            ? {
-                title: 'From the Sun',
-                class: 'number',
-                cell: ({ stretches }) => (
-                  <Lines lines={stretches.map(({ peak }) => angleWords(Math.abs(peak.elongationDeg)))} />
-                ),
-              }
-            : {
-                title: 'Hours in the dark, longest night',
-                class: 'number',
-                cell: ({ stretches }) => (
-                  <Lines lines={stretches.map(({ peak }) => fixed(shownHours(peak), 1))} />
-                ),
-              },
         ]}
         rows={seasons.map((season) => ({ body: season.body, stretches: bestStretches(season) }))}
         keyOf={({ body }) => body}
@@ -81,3 +66,9 @@ export function SeasonChapter(input: ReportInput) {
     </>
   );
 }
+
+/** `morning sky, up to 3.0 h in the dark`; without a site how far from the Sun. */
+const peakWords = (peak: SeasonSample): string =>
+  peak.darkHours === null
+    ? `${stateWords[peak.state]}, ${angleWords(Math.abs(peak.elongationDeg))} from the Sun`
+    : `${stateWords[peak.state]}, up to ${fixed(shownHours(peak), 1)} h in the dark`;

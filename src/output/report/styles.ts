@@ -116,6 +116,7 @@ dd{margin-bottom:.8rem}
 .stack thead{position:absolute;left:-999rem}
 .stack tr{padding:.7rem 0;border-bottom:1px solid var(--rule)}
 .stack td,.stack th{border:0;padding:.1rem 0;width:auto}
+.stack tbody th{font-weight:600}
 .stack .number{text-align:left}
 .events .when,.events .what{width:auto}
 .stack td[data-label]::before{content:attr(data-label) ": ";color:var(--quiet)}

@@ -9,7 +9,9 @@ export interface Column<Row> {
 interface TableProps<Row> {
   readonly id?: string;
   readonly class?: string;
-  readonly caption: ComponentChildren;
+  /** What it shows; a table under a heading of its own is named by that instead. */
+  readonly caption?: string;
+  readonly labelledBy?: string;
   /** The first one names the row. */
   readonly columns: readonly Column<Row>[];
   readonly rows: readonly Row[];
@@ -20,10 +22,15 @@ interface TableProps<Row> {
  * A table that becomes a list of cards on a phone: every cell then carries its column's name. The roles are written
  * out because browsers forget them where a style sheet lays a table out as blocks.
  */
-export function Table<Row>({ id, class: name, caption, columns, rows, keyOf }: TableProps<Row>) {
+export function Table<Row>({ id, class: name, caption, labelledBy, columns, rows, keyOf }: TableProps<Row>) {
   return (
-    <table class={name === undefined ? 'stack' : `stack ${name}`} role="table" id={id}>
-      <caption>{caption}</caption>
+    <table
+      class={name === undefined ? 'stack' : `stack ${name}`}
+      role="table"
+      id={id}
+      aria-labelledby={labelledBy}
+    >
+      {caption === undefined ? null : <caption>{caption}</caption>}
       <thead role="rowgroup">
         <tr role="row">
           {columns.map((column) => (
