@@ -5,7 +5,7 @@ import type { Reckoning } from './event.js';
 import type { Kind, Limits, Subject } from './kinds.js';
 import { nearest, refineTurn, refineZero } from './refine.js';
 import type { SkyModel } from './signal.js';
-import { trace } from './trace.js';
+import { joinTraces, trace } from './trace.js';
 import type { Trace } from './trace.js';
 import type { TrackedSky } from './tracked-sky.js';
 
@@ -46,8 +46,6 @@ const MEAN_REACH_CYCLES = 0.25;
 const APSIS_REACH_CYCLES = 0.1;
 /** How far a zero or turn of the Kepler orbits may lie from the refined one and still be its estimate. */
 export const KEPLER_REACH_DAYS = 60;
-/** A search looks this far beyond its span, so that an event near the edge is judged by its refined instant. */
-const EDGE_DAYS = 30;
 
 /** One subject of one kind, reckoned in one coordinate. */
 export interface Question {
@@ -58,76 +56,86 @@ export interface Question {
 
 /** Every event that answers a question within a span, in order of time. */
 export function search(question: Question, span: Span, context: SearchContext): Finding[] {
-  const wide = { from: ttDays(span.from - EDGE_DAYS), to: ttDays(span.to + EDGE_DAYS) };
-  return methods[question.kind.search](question, wide, context)
+  const { find, edgeDays } = methods[question.kind.search];
+  const wide = { from: ttDays(span.from - edgeDays), to: ttDays(span.to + edgeDays) };
+  return find(question, wide, context)
     .filter(({ tt }) => tt >= span.from && tt < span.to)
     .sort((a, b) => a.tt - b.tt);
 }
 
-type Method = (question: Question, wide: Span, context: SearchContext) => Finding[];
+interface Method {
+  readonly find: (question: Question, wide: Span, context: SearchContext) => Finding[];
+  /** How far beyond a span it looks, so that an event near the edge is judged by its refined instant. */
+  readonly edgeDays: number;
+}
 
+/** A Kepler estimate is days off for the giants; what is traced moves by minutes when it is decided. */
 const methods: Readonly<Record<Kind['search'], Method>> = {
-  /** Monotone through the cycle: mean instant, Kepler orbits, ephemeris, each found from the one before. */
-  'one-a-cycle'(question, wide, { sky, kepler }) {
-    const { kind, subject, reckoning } = question;
-    const { cycle, meanEstimate } = kind.numbering(subject);
-    const reach = MEAN_REACH_CYCLES * cycle.periodDays;
-    const onKepler = kind.signal(kepler, subject, reckoning);
-    const onSky = kind.signal(sky, subject, reckoning);
-    const exact = kind.exactValue?.(sky, subject, reckoning);
-    const cycles = cyclesOverlapping(cycle, ttDays(wide.from - reach), ttDays(wide.to + reach));
-    return cycles.flatMap((n): Finding[] => {
-      const mean = meanEstimate(n, wide.from)!;
-      const estimate = nearest('zero', onKepler, mean, reach);
-      if (estimate === null || estimate < wide.from || estimate >= wide.to) return [];
-      const tt =
-        exact === undefined
-          ? nearest('zero', onSky, estimate, reach)
-          : refineZero(estimate, onKepler(estimate).rate, exact, reach);
-      return tt === null ? [] : [{ ...question, ...lone, cycle: n, tt, mean, kepler: estimate }];
-    });
-  },
-
-  'all-in-cycle'(question, wide, context) {
-    const { kind, subject } = question;
-    const { cycle } = kind.numbering(subject);
-    return cyclesOverlapping(cycle, wide.from, wide.to).flatMap((n) =>
-      cycleFindings(question, n, wide, context),
-    );
-  },
-
-  /** The extreme of a distance that may wobble about it: the highest or deepest turn near the Kepler orbit's. */
-  'extreme-of-cycle'(question, wide, { sky, kepler }) {
-    const { kind, subject, reckoning } = question;
-    const { cycle, meanEstimate } = kind.numbering(subject);
-    const reach = APSIS_REACH_CYCLES * cycle.periodDays;
-    const sense = kind.sought === 'maximum' ? 1 : -1;
-    const cycles = cyclesOverlapping(cycle, ttDays(wide.from - 2 * reach), ttDays(wide.to + 2 * reach));
-    return cycles.flatMap((n): Finding[] => {
-      const mean = meanEstimate(n, wide.from)!;
-      const estimate = nearest(kind.sought, kind.signal(kepler, subject, reckoning), mean, reach);
-      if (estimate === null || estimate + reach < wide.from || estimate - reach >= wide.to) return [];
-      const { turns } = trace(
-        kind.signal(sky, subject, reckoning),
-        ttDays(estimate - reach),
-        ttDays(estimate + reach),
-        kind.stepDays(subject),
-      );
-      const [extreme, ...others] = turns
-        .filter(({ is }) => is === kind.sought)
-        .sort((a, b) => sense * (b.value - a.value));
-      if (extreme === undefined) return [];
-      const localTurns = others.map(({ tt }) => tt).sort((a, b) => a - b);
-      return [{ ...question, ...lone, cycle: n, tt: extreme.tt, mean, kepler: estimate, localTurns }];
-    });
-  },
+  'one-a-cycle': { find: oneACycle, edgeDays: 30 },
+  'all-in-cycle': { find: allInCycle, edgeDays: 1 },
+  'extreme-of-cycle': { find: extremeOfCycle, edgeDays: 0 },
 };
+
+/** Monotone through the cycle: mean instant, Kepler orbits, ephemeris, each found from the one before. */
+function oneACycle(question: Question, wide: Span, { sky, kepler }: SearchContext): Finding[] {
+  const { kind, subject, reckoning } = question;
+  const { cycle, meanEstimate } = kind.numbering(subject);
+  const reach = MEAN_REACH_CYCLES * cycle.periodDays;
+  const onKepler = kind.signal(kepler, subject, reckoning);
+  const onSky = kind.signal(sky, subject, reckoning);
+  const exact = kind.exactValue?.(sky, subject, reckoning);
+  const cycles = cyclesOverlapping(cycle, ttDays(wide.from - reach), ttDays(wide.to + reach));
+  return cycles.flatMap((n): Finding[] => {
+    const mean = meanEstimate(n, wide.from)!;
+    const estimate = nearest('zero', onKepler, mean, reach);
+    if (estimate === null || estimate < wide.from || estimate >= wide.to) return [];
+    const tt =
+      exact === undefined
+        ? nearest('zero', onSky, estimate, reach)
+        : refineZero(estimate, onKepler(estimate).rate, exact, reach);
+    return tt === null ? [] : [{ ...question, ...lone, cycle: n, tt, mean, kepler: estimate }];
+  });
+}
+
+function allInCycle(question: Question, wide: Span, context: SearchContext): Finding[] {
+  const { kind, subject } = question;
+  const { cycle } = kind.numbering(subject);
+  return cyclesOverlapping(cycle, wide.from, wide.to).flatMap((n) =>
+    cycleFindings(question, n, wide, context),
+  );
+}
+
+/** The extreme of a distance that may wobble about it: the highest or deepest turn near the Kepler orbit's. */
+function extremeOfCycle(question: Question, wide: Span, { sky, kepler }: SearchContext): Finding[] {
+  const { kind, subject, reckoning } = question;
+  const { cycle, meanEstimate } = kind.numbering(subject);
+  const reach = APSIS_REACH_CYCLES * cycle.periodDays;
+  const sense = kind.sought === 'maximum' ? 1 : -1;
+  const cycles = cyclesOverlapping(cycle, ttDays(wide.from - 2 * reach), ttDays(wide.to + 2 * reach));
+  return cycles.flatMap((n): Finding[] => {
+    const mean = meanEstimate(n, wide.from)!;
+    const estimate = nearest(kind.sought, kind.signal(kepler, subject, reckoning), mean, reach);
+    if (estimate === null || estimate + reach < wide.from || estimate - reach >= wide.to) return [];
+    const { turns } = trace(
+      kind.signal(sky, subject, reckoning),
+      ttDays(estimate - reach),
+      ttDays(estimate + reach),
+      kind.stepDays(subject),
+    );
+    const [extreme, ...others] = turns
+      .filter(({ is }) => is === kind.sought)
+      .sort((a, b) => sense * (b.value - a.value));
+    if (extreme === undefined) return [];
+    const localTurns = others.map(({ tt }) => tt).sort((a, b) => a - b);
+    return [{ ...question, ...lone, cycle: n, tt: extreme.tt, mean, kepler: estimate, localTurns }];
+  });
+}
 
 const lone = { ordinal: 0, index: 1, of: 1, localTurns: [] };
 
 /**
- * Every event of one cycle. Its stretch is followed from end to end wherever it holds an event in the span, because
- * an event's letter counts from the stretch's beginning; a stretch of a century without one is not worth following.
+ * Every event of one cycle within the span. Its stretch is followed from its beginning wherever it holds one, because
+ * an event's letter counts from there; a stretch of a century without an event is not worth following.
  */
 function cycleFindings(question: Question, n: number, wide: Span, context: SearchContext): Finding[] {
   const { kind, subject, reckoning } = question;
@@ -140,7 +148,10 @@ function cycleFindings(question: Question, n: number, wide: Span, context: Searc
   const to = ttDays(Math.min(stretch.to, wide.to));
   const part = follow(from, to);
   if (!candidates(kind, part).some(({ tt }) => kind.reports(sky, subject, tt, limits))) return [];
-  const whole = from === stretch.from && to === stretch.to ? part : follow(stretch.from, stretch.to);
+  const head = follow(stretch.from, from);
+  // Only zeros are numbered "1 of 3", and so only they need what comes after the span.
+  const tail = kind.sought === 'zero' ? follow(to, stretch.to) : NOTHING;
+  const whole = joinTraces([head, part, tail]);
 
   const onKepler = kind.signal(kepler, subject, reckoning);
   const exact = kind.exactValue?.(sky, subject, reckoning);
@@ -165,6 +176,8 @@ function cycleFindings(question: Question, n: number, wide: Span, context: Searc
     ];
   });
 }
+
+const NOTHING: Trace = { roots: [], turns: [] };
 
 interface Candidate {
   readonly tt: TtDays;

@@ -81,6 +81,18 @@ export function trace(signal: Signal, from: TtDays, to: TtDays, stepDays: number
 /** Rising or falling just before a point; a turn exactly at the point is still to come. */
 const trendBefore = ({ rate, acceleration }: Jet): number => Math.sign(rate) || -Math.sign(acceleration);
 
+/** Traces of adjoining stretches as the one trace of all of them. */
+export function joinTraces(traces: readonly Trace[]): Trace {
+  const turns = traces.flatMap((part) => part.turns);
+  let before = 0;
+  const roots = traces.flatMap((part) => {
+    const shifted = part.roots.map(({ tt, branch }) => ({ tt, branch: branch + before }));
+    before += part.turns.length;
+    return shifted;
+  });
+  return { roots, turns };
+}
+
 function rateZero(
   rateAt: (tt: number) => number,
   low: number,

@@ -1,21 +1,22 @@
 import { describe, expect, it } from 'vitest';
 import type { Planet } from '../../../src/bodies/index.js';
 import { forecast } from '../../../src/forecast/index.js';
-import type { ForecastEvent, ForecastRequest } from '../../../src/forecast/index.js';
+import type { ForecastRequest } from '../../../src/forecast/index.js';
 import { DAYS_PER_JULIAN_YEAR, utcMillis } from '../../../src/time/index.js';
 import type { UtcMillis } from '../../../src/time/index.js';
 
 const day = (text: string): UtcMillis => utcMillis(Date.parse(text));
 const ask = (from: string, to: string, rest: Omit<ForecastRequest, 'from' | 'to'> = {}) =>
   forecast({ from: day(from), to: day(to), ...rest });
-const told = (events: readonly ForecastEvent[]) => events.map(({ id, tt }) => `${id} ${tt.toFixed(7)}`);
 
 describe('forecast', () => {
   it('gives a span in two parts what it gives it whole: nothing lost on the seam, nothing twice', () => {
     const whole = ask('2027-01-01', '2028-01-01');
     const parts = ['2027-01-01', '2027-02-19T15:51:53Z', '2027-04-19T13:01:10Z', '2027-08-11', '2028-01-01'];
     const pieces = parts.slice(1).flatMap((to, i) => ask(parts[i]!, to).events);
-    expect(told(pieces)).toEqual(told(whole.events));
+    expect(pieces.map(({ id }) => id)).toEqual(whole.events.map(({ id }) => id));
+    // A search that begins elsewhere ends within its own tolerance of the same instant: 0.01 s.
+    pieces.forEach(({ tt }, i) => expect(tt).toBeCloseTo(whole.events[i]!.tt, 6));
     expect(whole.events.length).toBeGreaterThan(180);
   });
 
@@ -106,7 +107,8 @@ describe('forecast', () => {
     const yearOf = (days: number) => 2000 + days / DAYS_PER_JULIAN_YEAR;
     expect(yearOf(tt)).toBeCloseTo(2042.69, 1);
     expect(uncertaintySeconds.tt).toBeGreaterThan(86_400);
-    const { localExtremes } = circumstances as { localExtremes: { utc: number }[] };
+    if (circumstances.about !== 'one-body') throw new Error('a perihelion is of one body');
+    const localExtremes = circumstances.localExtremes ?? [];
     // The second deepest turn of this revolution is in mid-2050: found on daily scans of 1600–2600.
     expect(localExtremes.map(({ utc }) => new Date(utc).getUTCFullYear())).toContain(2050);
   });
