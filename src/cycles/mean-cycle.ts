@@ -35,9 +35,10 @@ export function stretchOf({ epoch, periodDays }: MeanCycle, n: number): { from: 
 /** The numbers of all cycles whose stretch has a part in [from, to), rising; none for an empty span. */
 export function cyclesOverlapping(cycle: MeanCycle, from: TtDays, to: TtDays): number[] {
   if (to <= from) return [];
+  // The nearest mean instants lie in the first and the last stretch, but for a rounding on their very edge.
   const first = cycleNumberAt(cycle, from) - 1;
-  const count = Math.ceil((to - from) / cycle.periodDays) + 4;
-  return Array.from({ length: count }, (_, i) => first + i).filter((n) => {
+  const last = cycleNumberAt(cycle, to) + 1;
+  return Array.from({ length: last - first + 1 }, (_, i) => first + i).filter((n) => {
     const stretch = stretchOf(cycle, n);
     return stretch.from < to && stretch.to > from;
   });
