@@ -1,13 +1,11 @@
 import { titleOf } from '../../bodies/index.js';
 import type { PairCircumstances } from '../../forecast/index.js';
-import { compassWords } from '../../sky/index.js';
-import { localDateTime } from '../../time/index.js';
 import { CloseUp } from '../charts/index.js';
-import { lookWords, nightWords } from '../look-words.js';
 import { angleWords, fixed } from '../numbers.js';
-import { dateAndClock, uncertaintyShort } from '../uncertainty-words.js';
+import { dateAndClock } from '../uncertainty-words.js';
 import { CLOSE_UP_DEG, closeUpMeetings } from './choose.js';
 import type { MeetingMoment } from './choose.js';
+import { closeUpTitle, closestWords, pairOf, sightWords } from './close-up-words.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
 import { Table } from './table.js';
@@ -28,9 +26,9 @@ export function CloseUpsChapter(input: ReportInput) {
             key={moment.meeting.id}
             id={`close-up-${moment.event.id.replaceAll(/[^a-z0-9]+/g, '-')}`}
             pair={pairOf(moment)}
-            title={titleFor(moment)}
-            finding={`${titleFor(moment)}. ${sightWords(moment, input)}`}
-            legend={`${whenWords(moment, input)} ${sightWords(moment, input)}`}
+            title={closeUpTitle(moment)}
+            finding={`${closeUpTitle(moment)}. ${sightWords(moment, input)}`}
+            legend={`${closestWords(moment, input)} ${sightWords(moment, input)}`}
             tableId="close-ups-table"
           />
         ))}
@@ -39,35 +37,6 @@ export function CloseUpsChapter(input: ReportInput) {
     </>
   );
 }
-
-/** Moments of a meeting are told of two bodies. */
-export function pairOf({ event: { circumstances, id } }: MeetingMoment): PairCircumstances {
-  if (circumstances.about !== 'two-bodies') throw new TypeError(`${id} is not about two bodies`);
-  return circumstances;
-}
-
-/** `Venus 14′ north of Neptune`. */
-export function titleFor(moment: MeetingMoment): string {
-  const { bodies, separationDeg, positionAngleDeg } = pairOf(moment);
-  const side = compassWords(positionAngleDeg + 180);
-  return `${titleOf(bodies[0].body)} ${angleWords(separationDeg)} ${side} of ${titleOf(bodies[1].body)}`;
-}
-
-const whenWords = ({ event }: MeetingMoment, input: ReportInput): string =>
-  `Closest ${dateAndClock(event, zoneOf(input))}, ${uncertaintyShort(event.uncertaintySeconds.utc)}.`;
-
-/** When and where to see it, at the first site that can. */
-export function sightWords({ event, seenFrom }: MeetingMoment, { sites }: ReportInput): string {
-  const site = sites.find(({ id }) => id === seenFrom?.site);
-  const look = seenFrom?.bestLook ?? null;
-  if (site === undefined || look === null)
-    return `On ${localDateTime(event.utc, 'UTC').toFormat('cccc d LLLL yyyy')}, ${fixed(pairElongation(event), 0)}° from the Sun.`;
-  const apart = look.separationDeg === null ? '' : `, ${angleWords(look.separationDeg)} apart then`;
-  return `From ${site.name}: ${lookWords(look, site.zone)} ${nightWords(look, site.zone)}${apart}.`;
-}
-
-const pairElongation = ({ circumstances }: MeetingMoment['event']): number =>
-  circumstances.about === 'two-bodies' ? circumstances.leastElongationDeg : 0;
 
 function NumbersOfAll({ moments, input }: { moments: readonly MeetingMoment[]; input: ReportInput }) {
   const ofBoth = (moment: MeetingMoment, tell: (body: PairCircumstances['bodies'][0]) => string) =>

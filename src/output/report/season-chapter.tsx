@@ -1,22 +1,12 @@
 import { titleOf } from '../../bodies/index.js';
-import type { SeasonSample, SeasonState } from '../../forecast/index.js';
 import { SeasonRibbons } from '../charts/index.js';
-import { angleWords, fixed } from '../numbers.js';
-import { bestStretches, shownHours } from './best-stretches.js';
+import { bestStretches } from './best-stretches.js';
 import { HEADLINE_MEETING_DEG, headlineMeetings } from './choose.js';
 import type { ReportInput } from './report-input.js';
 import { Lines } from './lines.js';
 import { zoneOf } from './report-input.js';
-import { seasonTitle, stretchWords } from './season-words.js';
+import { seasonTitle, stretchAndPeakWords, stretchWords } from './season-words.js';
 import { Table } from './table.js';
-
-const stateWords: Readonly<Record<SeasonState, string>> = {
-  dusk: 'evening sky',
-  dawn: 'morning sky',
-  full: 'most of the night',
-  sun: 'too near the Sun',
-  none: 'not to be seen',
-};
 
 export function SeasonChapter(input: ReportInput) {
   const { seasons, forecast, sites } = input;
@@ -54,9 +44,7 @@ export function SeasonChapter(input: ReportInput) {
           {
             title: 'At its best',
             cell: ({ stretches }) => (
-              <Lines
-                lines={stretches.map((best) => `${stretchWords(best, zone)}, ${peakWords(best.peak)}`)}
-              />
+              <Lines lines={stretches.map((best) => stretchAndPeakWords(best, zone))} />
             ),
           },
         ]}
@@ -66,9 +54,3 @@ export function SeasonChapter(input: ReportInput) {
     </>
   );
 }
-
-/** `morning sky, up to 3.0 h in the dark`; without a site how far from the Sun. */
-const peakWords = (peak: SeasonSample): string =>
-  peak.darkHours === null
-    ? `${stateWords[peak.state]}, ${angleWords(Math.abs(peak.elongationDeg))} from the Sun`
-    : `${stateWords[peak.state]}, up to ${fixed(shownHours(peak), 1)} h in the dark`;

@@ -1,5 +1,8 @@
 import { titleOf } from '../../bodies/index.js';
+import type { SeasonSample, SeasonState } from '../../forecast/index.js';
 import { localDateTime } from '../../time/index.js';
+import { angleWords, fixed } from '../numbers.js';
+import { shownHours } from './best-stretches.js';
 import type { BestStretch } from './best-stretches.js';
 
 /** `from 13 Jan to 18 Mar 2027`, `until 6 Mar 2027` where it began before the span, `around 2 Feb 2027`. */
@@ -12,6 +15,23 @@ export function stretchWords({ from, to, opensBefore, endsAfter }: BestStretch, 
   if (from === to) return `around ${lastDay}`;
   return `from ${first.toFormat(first.year === last.year ? 'd LLL' : 'd LLL yyyy')} to ${lastDay}`;
 }
+
+const stateWords: Readonly<Record<SeasonState, string>> = {
+  dusk: 'evening sky',
+  dawn: 'morning sky',
+  full: 'most of the night',
+  sun: 'too near the Sun',
+  none: 'not to be seen',
+};
+
+/** `morning sky, up to 3.0 h in the dark`; without a site how far from the Sun. */
+const peakWords = (peak: SeasonSample): string =>
+  peak.darkHours === null
+    ? `${stateWords[peak.state]}, ${angleWords(Math.abs(peak.elongationDeg))} from the Sun`
+    : `${stateWords[peak.state]}, up to ${fixed(shownHours(peak), 1)} h in the dark`;
+
+export const stretchAndPeakWords = (best: BestStretch, zone: string): string =>
+  `${stretchWords(best, zone)}, ${peakWords(best.peak)}`;
 
 /** The bright planets that have a season: the finding of the picture. */
 const LEADING: readonly BestStretch['body'][] = ['venus', 'mars', 'jupiter', 'saturn'];
