@@ -23,7 +23,8 @@ export function rotationTo(frame: Frame, tt: TtDays): Rotation {
 /** Tilts the axes of the true equator of date, given by their rotation, by the true obliquity. */
 export function eclipticFromEquator([x, y, z]: Rotation, tt: TtDays): Rotation {
   const obliquity = e_tilt(libraryTime(tt)).tobl * RADIANS_PER_DEGREE;
-  const [cosine, sine] = [Math.cos(obliquity), Math.sin(obliquity)];
+  const cosine = Math.cos(obliquity);
+  const sine = Math.sin(obliquity);
   return [x, add(scale(y, cosine), scale(z, sine)), add(scale(z, cosine), scale(y, -sine))];
 }
 

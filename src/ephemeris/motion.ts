@@ -32,9 +32,12 @@ export function longitudeOf(x: Jet, y: Jet, perDay: number): Jet {
 }
 
 /** The longitude of a motion on turned axes that are taken as fixed at the instant. */
-export const longitudeOfMotion = ({ position, velocity, acceleration }: Motion, [x, y]: Rotation): Jet =>
-  longitudeOf(
+export function longitudeOfMotion({ position, velocity, acceleration }: Motion, axes: Rotation): Jet {
+  const x = axes[0];
+  const y = axes[1];
+  return longitudeOf(
     { value: dot(x, position), rate: dot(x, velocity), acceleration: dot(x, acceleration) },
     { value: dot(y, position), rate: dot(y, velocity), acceleration: dot(y, acceleration) },
     1,
   );
+}

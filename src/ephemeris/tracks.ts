@@ -55,13 +55,15 @@ export class Tracks implements Paths {
 
   /** A body's place at a node is computed once and fitted on both kinds of axes. */
   private tracksOf(body: Body): ByFrame<VectorTrack> {
-    const fit = byFrame(() => new BlockFit(shape.nodes));
+    const equator = new BlockFit(shape.nodes);
+    const ecliptic = new BlockFit(shape.nodes);
     const blocks = new BlockCache((block): ByFrame<Float64Array> => {
       for (let node = 0; node < shape.nodes; node++) {
         const place = this.places.undeflected(body, this.skies.observer(block, node));
-        for (const frame of frames) fit[frame].put(node, rotate(this.skies.turn(frame, block, node), place));
+        equator.put(node, rotate(this.skies.turn('equator-of-date', block, node), place));
+        ecliptic.put(node, rotate(this.skies.turn('ecliptic-of-date', block, node), place));
       }
-      return byFrame((frame) => fit[frame].coefficients());
+      return { 'equator-of-date': equator.coefficients(), 'ecliptic-of-date': ecliptic.coefficients() };
     }, KEPT_BLOCKS);
     return byFrame((frame) => new VectorTrack(shape, (index) => blocks.get(index)[frame]));
   }
@@ -71,8 +73,6 @@ export class Tracks implements Paths {
     return [row(0), row(1), row(2)];
   }
 }
-
-const frames: readonly Frame[] = ['equator-of-date', 'ecliptic-of-date'];
 
 const byFrame = <Value>(value: (frame: Frame) => Value): ByFrame<Value> => ({
   'equator-of-date': value('equator-of-date'),

@@ -27,7 +27,9 @@ export const KEPT_BLOCKS = 4096;
  * [k, k+1)·blockDays of TT since J2000.0, so that every track with blocks of one length shares its nodes.
  */
 export class VectorTrack {
-  private readonly jets: readonly [Jet, Jet, Jet] = [emptyJet(), emptyJet(), emptyJet()];
+  private readonly jetX: Jet = emptyJet();
+  private readonly jetY: Jet = emptyJet();
+  private readonly jetZ: Jet = emptyJet();
   private readonly perDay: number;
 
   constructor(
@@ -57,7 +59,7 @@ export class VectorTrack {
     const x = (tt - index * blockDays) * perDay - 1;
     const block = this.blockAt(index);
     const terms = block.length / 3;
-    const [jx, jy, jz] = this.jets;
+    const { jetX: jx, jetY: jy, jetZ: jz } = this;
     evaluateChebyshev(block, 0, terms, x, jx);
     evaluateChebyshev(block, terms, terms, x, jy);
     evaluateChebyshev(block, 2 * terms, terms, x, jz);
@@ -80,7 +82,7 @@ export class VectorTrack {
     const x = (tt - index * blockDays) * this.perDay - 1;
     const block = this.blockAt(index);
     const terms = block.length / 3;
-    const [jx, jy] = this.jets;
+    const { jetX: jx, jetY: jy } = this;
     evaluateChebyshev(block, 0, terms, x, jx);
     evaluateChebyshev(block, terms, terms, x, jy);
     return longitudeOf(jx, jy, this.perDay);

@@ -59,8 +59,10 @@ function fromEclipticJ2000(frame: Frame, tt: TtDays): Rotation {
     frame === 'ecliptic-of-date'
       ? 0
       : (OBLIQUITY_J2000_ARCSEC + OBLIQUITY_ARCSEC_PER_CENTURY * centuries) * RADIANS_PER_ARCSEC;
-  const [cp, sp] = [Math.cos(precession), Math.sin(precession)];
-  const [co, so] = [Math.cos(obliquity), Math.sin(obliquity)];
+  const cp = Math.cos(precession);
+  const sp = Math.sin(precession);
+  const co = Math.cos(obliquity);
+  const so = Math.sin(obliquity);
   return [
     { x: cp, y: -sp, z: 0 },
     { x: sp * co, y: cp * co, z: -so },

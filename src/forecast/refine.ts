@@ -50,7 +50,8 @@ export function nearest(
   let tt = estimate;
   for (let step = 0; step < 4 * MAX_STEPS; step++) {
     const jet = signal(tt);
-    const [height, slope] = sought === 'zero' ? [jet.value, jet.rate] : [jet.rate, jet.acceleration];
+    const height = sought === 'zero' ? jet.value : jet.rate;
+    const slope = sought === 'zero' ? jet.rate : jet.acceleration;
     // On the wrong side of an inflection Newton's step leads away from a turning point of the wanted sense: climb instead.
     const wrongWay = sought !== 'zero' && slope > 0 === (sought === 'maximum');
     const wanted = wrongWay

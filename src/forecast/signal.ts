@@ -42,7 +42,8 @@ export function separationJet(a: Motion, b: Motion): Jet {
   const product =
     dot(a.acceleration, b.position) + 2 * dot(a.velocity, b.velocity) + dot(a.position, b.acceleration);
   const productRate = dot(a.velocity, b.position) + dot(a.position, b.velocity);
-  const [la, lb] = [logarithmicLength(a), logarithmicLength(b)];
+  const la = logarithmicLength(a);
+  const lb = logarithmicLength(b);
   const lengths = Math.sqrt(la.value * lb.value);
   const growth = la.rate + lb.rate;
   const cosine = dot(a.position, b.position) / lengths;

@@ -28,13 +28,22 @@ export function bracketedRoot(
     throw new NoConvergenceError(`no change of sign between ${low} (${fLow}) and ${high} (${fHigh})`);
   }
   // b is the best point so far, c the other side of the root, a the point before b.
-  let [a, fa, b, fb] = [low, fLow, high, fHigh];
-  let [c, fc] = [a, fa];
+  let a = low;
+  let fa = fLow;
+  let b = high;
+  let fb = fHigh;
+  let c = a;
+  let fc = fa;
   let step = b - a;
   let stepBefore = step;
   for (let count = 0; count < MAX_BRACKETED_STEPS; count++) {
     if (Math.abs(fc) < Math.abs(fb)) {
-      [a, fa, b, fb, c, fc] = [b, fb, c, fc, b, fb];
+      a = b;
+      fa = fb;
+      b = c;
+      fb = fc;
+      c = a;
+      fc = fa;
     }
     const half = (c - b) / 2;
     const least = tolerance / 2 + 2 * Number.EPSILON * Math.abs(b);
@@ -47,11 +56,13 @@ export function bracketedRoot(
       proposed > 0 === half > 0;
     stepBefore = trusted ? step : half;
     step = trusted ? proposed : half;
-    [a, fa] = [b, fb];
+    a = b;
+    fa = fb;
     b += Math.abs(step) > least ? step : Math.sign(half) * least;
     fb = f(b);
     if (fb > 0 === fc > 0) {
-      [c, fc] = [a, fa];
+      c = a;
+      fc = fa;
       step = stepBefore = b - a;
     }
   }
