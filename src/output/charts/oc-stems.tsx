@@ -8,7 +8,7 @@ import { TimeAxis, timeTicks } from './time-axis.js';
 const TOP = 52;
 const PANEL_HEIGHT = 96;
 const GAP = 40;
-const HEIGHT = TOP + 2 * PANEL_HEIGHT + GAP + 6;
+const HEIGHT = TOP + 2 * PANEL_HEIGHT + GAP + 12;
 
 interface OcStemsProps {
   readonly id: string;
