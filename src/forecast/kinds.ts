@@ -52,10 +52,12 @@ export interface Kind {
   signal(sky: SkyModel, subject: Subject, reckoning: Reckoning): Signal;
   readonly sought: 'zero' | 'maximum' | 'minimum';
   /**
-   * `one-a-cycle`: the signal is monotone, so go straight from the Kepler estimate. `all-in-cycle`: every one of the
-   * cycle's stretch. `extreme-of-cycle`: the highest or deepest near the Kepler estimate, local ones being wobble.
+   * `one-a-cycle`: the signal is monotone, so go straight from the Kepler estimate. `one-turn-a-cycle`: it turns that
+   * way once in each stretch (tried on every cycle of 1600–2600), so the turn needs no count. `all-in-cycle`: every
+   * one of the cycle's stretch. `extreme-of-cycle`: the highest or deepest near the Kepler estimate, local ones being
+   * wobble.
    */
-  readonly search: 'one-a-cycle' | 'all-in-cycle' | 'extreme-of-cycle';
+  readonly search: 'one-a-cycle' | 'one-turn-a-cycle' | 'all-in-cycle' | 'extreme-of-cycle';
   /**
    * The signal's value on exact places, the Sun's deflection of light included, which has the last word on the
    * instant; null where the signal itself is exact or the difference does not matter.
@@ -129,7 +131,7 @@ function greatestElongation(side: 'east' | 'west'): Kind {
           sky.geocentric('sun', 'equator-of-date', tt),
         ),
     sought: 'maximum',
-    search: 'all-in-cycle',
+    search: 'one-turn-a-cycle',
     exactValue: null,
     stepDays: loopStepDays,
     accepts: (sky, [planet], tt) => isEastOfSun(sky, planet, tt) === (side === 'east'),
@@ -150,7 +152,7 @@ function station(name: 'stationary-retrograde' | 'stationary-direct'): Kind {
       (tt) =>
         sky.longitude(planet, frameOf(reckoning), tt),
     sought: name === 'stationary-retrograde' ? 'maximum' : 'minimum',
-    search: 'all-in-cycle',
+    search: 'one-turn-a-cycle',
     exactValue: null,
     stepDays: loopStepDays,
     accepts: always,
@@ -171,7 +173,7 @@ function distanceExtreme(name: 'closest-approach' | 'farthest'): Kind {
       (tt) =>
         distanceJet(subtractMotions(sky.heliocentric(planet, tt), sky.heliocentric('earth', tt))),
     sought: name === 'closest-approach' ? 'minimum' : 'maximum',
-    search: 'all-in-cycle',
+    search: 'one-turn-a-cycle',
     exactValue: null,
     stepDays: loopStepDays,
     accepts: always,

@@ -72,6 +72,7 @@ interface Method {
 /** A Kepler estimate is days off for the giants; what is traced moves by minutes when it is decided. */
 const methods: Readonly<Record<Kind['search'], Method>> = {
   'one-a-cycle': { find: oneACycle, edgeDays: 30 },
+  'one-turn-a-cycle': { find: allInCycle, edgeDays: 1 },
   'all-in-cycle': { find: allInCycle, edgeDays: 1 },
   'extreme-of-cycle': { find: extremeOfCycle, edgeDays: 0 },
 };
@@ -135,7 +136,8 @@ const lone = { ordinal: 0, index: 1, of: 1, localTurns: [] };
 
 /**
  * Every event of one cycle within the span. Its stretch is followed from its beginning wherever it holds one, because
- * an event's letter counts from there; a stretch of a century without an event is not worth following.
+ * an event's letter counts from there, unless there is only one; a stretch of a century without an event is not worth
+ * following.
  */
 function cycleFindings(question: Question, n: number, wide: Span, context: SearchContext): Finding[] {
   const { kind, subject, reckoning } = question;
@@ -148,7 +150,7 @@ function cycleFindings(question: Question, n: number, wide: Span, context: Searc
   const to = ttDays(Math.min(stretch.to, wide.to));
   const part = follow(from, to);
   if (!candidates(kind, part).some(({ tt }) => kind.reports(sky, subject, tt, limits))) return [];
-  const head = follow(stretch.from, from);
+  const head = kind.search === 'one-turn-a-cycle' ? NOTHING : follow(stretch.from, from);
   // Only zeros are numbered "1 of 3", and so only they need what comes after the span.
   const tail = kind.sought === 'zero' ? follow(to, stretch.to) : NOTHING;
   const whole = joinTraces([head, part, tail]);
