@@ -22,30 +22,34 @@ const WIDTH = COLUMN_WIDTH;
 const TOP = 26;
 const ROW_HEIGHT = 22;
 const TICKS = [
-  [1, '1 s'],
-  [60, '1 min'],
-  [600, '10 min'],
-  [3600, '1 h'],
-  [86_400, '1 day'],
-  [864_000, '10 days'],
-  [8_640_000, '100 days'],
+  { seconds: 1, words: '1 s' },
+  { seconds: 10, words: '10 s' },
+  { seconds: 60, words: '1 min' },
+  { seconds: 600, words: '10 min' },
+  { seconds: 3600, words: '1 h' },
+  { seconds: 86_400, words: '1 day' },
+  { seconds: 864_000, words: '10 days' },
+  { seconds: 8_640_000, words: '100 days' },
 ] as const;
 
 /** A bar a kind from its surest date to its least sure one, on a scale of powers; a dot at the middle one. */
 export function SurenessStrip({ kinds, title, finding, tableId }: SurenessStripProps) {
   const least = Math.min(...kinds.map(({ bestSeconds }) => bestSeconds));
   const most = Math.max(...kinds.map(({ worstSeconds }) => worstSeconds));
+  const first = TICKS.findLast(({ seconds }) => seconds <= least) ?? TICKS[0];
+  const last = TICKS.find(({ seconds }) => seconds > most) ?? TICKS.at(-1)!;
   const x = scaleLog()
-    .domain([least / 1.6, most * 1.6])
-    .range([LABELS, WIDTH - 8]);
+    .domain([first.seconds, last.seconds])
+    .range([LABELS, WIDTH - 30])
+    .clamp(true);
   const height = TOP + kinds.length * ROW_HEIGHT + 6;
   return (
     <Figure id="sureness" width={WIDTH} height={height} {...{ title, finding, tableId }}>
       <g class="axis">
-        {TICKS.filter(([seconds]) => seconds > x.domain()[0]! && seconds < x.domain()[1]!).map(
-          ([seconds, words]) => (
+        {TICKS.filter(({ seconds }) => seconds >= first.seconds && seconds <= last.seconds).map(
+          ({ seconds, words }) => (
             <g key={words}>
-              <line x1={px(x(seconds))} x2={px(x(seconds))} y1={18} y2={height} class="rule strong" />
+              <path d={`M${px(x(seconds))} 18V${height}`} class="rule strong" />
               <text x={px(x(seconds))} y={12} class="middle">
                 {words}
               </text>

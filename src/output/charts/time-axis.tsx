@@ -1,6 +1,7 @@
 import type { ScaleLinear } from 'd3-scale';
 import { localDateTime, utcMillis } from '../../time/index.js';
 import type { UtcMillis } from '../../time/index.js';
+import { px } from './px.js';
 
 export type TimeScale = ScaleLinear<number, number>;
 
@@ -49,9 +50,9 @@ export function TimeAxis({ ticks, x, top, bottom }: TimeAxisProps) {
     <g class="axis">
       {ticks.map(({ utc, label, major }) => (
         <g key={utc}>
-          <line x1={x(utc)} x2={x(utc)} y1={top} y2={bottom} class={major ? 'rule strong' : 'rule'} />
+          <path d={`M${px(x(utc))} ${top}V${bottom}`} class={major ? 'rule strong' : 'rule'} />
           {x(utc) > right - LABEL_ROOM ? null : (
-            <text x={x(utc) + 4} y={top + 10}>
+            <text x={px(x(utc) + 4)} y={top + 10}>
               {label}
             </text>
           )}

@@ -50,8 +50,8 @@ const SURE_SECONDS = 900;
 /** `339 of 426 instants are known to a quarter of an hour or better`. */
 export function certaintyTitle(events: readonly ForecastEvent[]): string {
   const sure = events.filter(({ uncertaintySeconds }) => uncertaintySeconds.utc <= SURE_SECONDS).length;
-  const whole = sure === events.length ? `All ${sure}` : `${sure} of ${events.length}`;
-  return `${whole} instants are known to a quarter of an hour or better`;
+  const known = sure === events.length ? 'Every instant is' : `${sure} of ${events.length} instants are`;
+  return `${known} known to a quarter of an hour or better`;
 }
 
 function grazingWords(events: readonly ForecastEvent[]): string {

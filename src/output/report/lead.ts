@@ -1,6 +1,5 @@
 import { titleOf } from '../../bodies/index.js';
 import { localDateTime, utcMillis } from '../../time/index.js';
-import { eventRows } from './event-rows.js';
 import type { ReportInput } from './report-input.js';
 import { zoneOf } from './report-input.js';
 import { listed } from './season-words.js';
@@ -16,12 +15,9 @@ export function leadOf(input: ReportInput): string {
   const where = home === undefined ? 'as seen from the Earth’s centre' : `as seen from ${home}`;
   const beside = partners.length === 0 ? '' : `, with ${listed(partners)} beside it`;
   const who = listed(forecast.bodies.filter((body) => body !== 'earth').map(titleOf));
-  const meetings = eventRows(forecast).filter(({ event }) => event.meeting !== null).length;
-  const counts = [
-    counted(forecast.events.length, 'event'),
-    ...(meetings > 0 ? [counted(meetings, 'meeting')] : []),
-  ];
-  return `${who} from ${first} to ${last}, ${where}${beside}: ${counts.join(', among them the moments of ')}.`;
+  const meetings = forecast.meetings.length;
+  const among = meetings === 0 ? '' : `, the moments of ${counted(meetings, 'meeting')} among them`;
+  return `${who} from ${first} to ${last}, ${where}${beside}: ${counted(forecast.events.length, 'event')}${among}.`;
 }
 
 const counted = (count: number, what: string): string => `${count} ${what}${count === 1 ? '' : 's'}`;

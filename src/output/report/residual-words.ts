@@ -20,13 +20,17 @@ export function residualTitle(series: ResidualSeries): string {
 }
 
 /** The same with the usual miss beside the worst, as a sentence. */
-export const findingOf = (series: ResidualSeries): string =>
-  `${subjectOf(series)}: ${missWords('the mean cycle', series.mean)}; ${missWords('the Kepler orbits', series.keplerTable1)}.`;
+export function findingOf(series: ResidualSeries): string {
+  const { mean, keplerTable1: kepler } = series;
+  const parts = [
+    mean === null ? 'there is no mean cycle' : missWords('the mean cycle misses', mean),
+    ...(kepler === null ? [] : [missWords('the Kepler orbits miss', kepler)]),
+  ];
+  return `${subjectOf(series)}: ${parts.join('; ')}.`;
+}
 
-const missWords = (what: string, spread: Spread | null): string =>
-  spread === null
-    ? `${what} gives no date`
-    : `${what} misses by ${spanWords(spread.rmsDays)} rms and ${spanWords(spread.worstDays)} at worst`;
+const missWords = (whatMisses: string, { rmsDays, worstDays }: Spread): string =>
+  `${whatMisses} by ${spanWords(rmsDays)} rms and ${spanWords(worstDays)} at worst`;
 
 /** `18 d, 26 d`: root mean square and worst. */
 export const spreadWords = (spread: Spread | null): string =>
