@@ -6,7 +6,7 @@ import type { Site } from '../sky/index.js';
 import { DAYS_PER_JULIAN_CENTURY, ttDays, ttFromUtc } from '../time/index.js';
 import type { UtcMillis } from '../time/index.js';
 import type { Forecast, ForecastEvent, Reckoning } from './event.js';
-import { eventTeller } from './tell-event.js';
+import { eventTeller, nameOf } from './tell-event.js';
 import { keplerSky } from './kepler-sky.js';
 import { kindNames } from './kind-names.js';
 import type { KindName } from './kind-names.js';
@@ -54,32 +54,34 @@ export function forecast(request: ForecastRequest): Forecast {
   const named = request.bodies ?? majorPlanets;
   const wanted = new Set(request.kinds ?? kindNames);
   const questions = questionsOf(wanted, named, request.reckoning);
-  const tell = eventTeller(sky, request.sites ?? []);
   const pieces = piecesOf({ from: ttFromUtc(request.from), to: ttFromUtc(request.to) });
+  const progress = (stage: number, done: number, of: number): void => {
+    request.onProgress?.((stage + done / of) / 2);
+  };
+  const searches = pieces.flatMap((piece) => questions.map((question) => ({ question, piece })));
+  const findings = searches.flatMap(({ question, piece }, i) => {
+    const found = search(question, piece, context);
+    progress(0, i + 1, searches.length);
+    return found;
+  });
 
-  let done = 0;
-  const events: ForecastEvent[] = [];
-  for (const piece of pieces) {
-    for (const question of questions) {
-      for (const finding of search(question, piece, context)) events.push(tell(finding));
-      done++;
-      request.onProgress?.(done / (pieces.length * questions.length));
-    }
-  }
-  events.sort(inOrder);
-
-  const meetings = meetingsOf(events, sky);
+  const meetings = meetingsOf(findings.map(nameOf), sky);
   const meetingOf = new Map(meetings.flatMap((meeting) => momentsOf(meeting).map((id) => [id, meeting.id])));
-  const reported = events
-    .filter(({ kind }) => wanted.has(kind))
-    .map((event) => ({ ...event, meeting: meetingOf.get(event.id) ?? null }));
-  const toldOf = new Set(reported.map(({ meeting }) => meeting));
+  const tell = eventTeller(sky, request.sites ?? []);
+  const reported = findings.filter(({ kind }) => wanted.has(kind.name));
+  const events = reported
+    .map((finding, i) => {
+      progress(1, i + 1, reported.length);
+      return tell(finding, meetingOf.get(nameOf(finding).id) ?? null);
+    })
+    .sort(inOrder);
+  const toldOf = new Set(events.map(({ meeting }) => meeting));
   return {
     from: request.from,
     to: request.to,
     source: { name: source.name, description: source.description },
     bodies: planets.filter((planet) => named.includes(planet)),
-    events: reported,
+    events,
     meetings: meetings.filter(({ id }) => toldOf.has(id)),
   };
 }

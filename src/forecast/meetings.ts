@@ -1,10 +1,11 @@
 import type { SkyPlanet } from '../bodies/index.js';
 import { angleBetween, degreesFromRadians } from '../math/index.js';
 import type { TtDays } from '../time/index.js';
-import type { ForecastEvent, Meeting } from './event.js';
+import type { Meeting } from './event.js';
 import type { KindName } from './kind-names.js';
 import { nearest } from './refine.js';
 import { separationJet } from './signal.js';
+import type { NamedEvent } from './tell-event.js';
 import type { TrackedSky } from './tracked-sky.js';
 
 /** Two descents that end this near to each other have found the same least separation. */
@@ -30,8 +31,8 @@ export const momentsOf = ({ conjunctionsRa, conjunctionsLongitude, appulse }: Me
  * Groups the conjunctions and appulses of each pair into meetings: those from which the separation falls to the same
  * local minimum belong together.
  */
-export function meetingsOf(events: readonly ForecastEvent[], sky: TrackedSky): Meeting[] {
-  const approaches = new Map<string, { closest: TtDays; moments: ForecastEvent[] }[]>();
+export function meetingsOf(events: readonly NamedEvent[], sky: TrackedSky): Meeting[] {
+  const approaches = new Map<string, { closest: TtDays; moments: NamedEvent[] }[]>();
   for (const event of events.filter(({ kind }) => isMomentKind(kind))) {
     const closest = closestAfterDescent(event, sky);
     const pair = event.bodies.join('-');
@@ -47,7 +48,7 @@ export function meetingsOf(events: readonly ForecastEvent[], sky: TrackedSky): M
     .sort((a, b) => a.closestTt - b.closestTt || (a.id < b.id ? -1 : 1));
 }
 
-function closestAfterDescent(event: ForecastEvent, sky: TrackedSky): TtDays {
+function closestAfterDescent(event: NamedEvent, sky: TrackedSky): TtDays {
   if (event.kind === 'appulse') return event.tt;
   const [a, b] = event.bodies;
   const separation = (tt: TtDays) =>
@@ -55,8 +56,8 @@ function closestAfterDescent(event: ForecastEvent, sky: TrackedSky): TtDays {
   return nearest('minimum', separation, event.tt, DESCENT_REACH_DAYS) ?? event.tt;
 }
 
-function describe(closest: TtDays, moments: readonly ForecastEvent[], sky: TrackedSky): Meeting {
-  const of = (kind: ForecastEvent['kind']) => moments.filter((event) => event.kind === kind);
+function describe(closest: TtDays, moments: readonly NamedEvent[], sky: TrackedSky): Meeting {
+  const of = (kind: KindName) => moments.filter((event) => event.kind === kind);
   const anchor = momentKinds.flatMap(of)[0]!;
   const bodies = anchor.bodies as readonly [SkyPlanet, SkyPlanet];
   const direction = (body: SkyPlanet | 'sun') => sky.places.apparent(body, closest);

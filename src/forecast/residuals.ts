@@ -88,7 +88,7 @@ export function residuals(request: ResidualRequest): ResidualSeries {
     const keplerTable1 = byTable1(tt);
     const keplerTable2 = byTable2(tt);
     return {
-      event: tell(finding),
+      event: tell(finding, null),
       ...{ mean, keplerTable1, keplerTable2 },
       meanDays: since(mean, tt),
       keplerTable1Days: since(keplerTable1, tt),

@@ -1,4 +1,4 @@
-import type { Planet, SkyPlanet } from '../bodies/index.js';
+import type { SkyPlanet } from '../bodies/index.js';
 import { length, rotate } from '../math/index.js';
 import { localViewer } from '../sky/index.js';
 import type { Site } from '../sky/index.js';
@@ -15,21 +15,30 @@ import type { TrackedSky } from './tracked-sky.js';
 import { turnTiming, zeroTiming } from './uncertainty.js';
 import type { Timing } from './uncertainty.js';
 
+/** What names an event, before anything else is known of it. */
+export type NamedEvent = Pick<ForecastEvent, 'id' | 'kind' | 'bodies' | 'cycle' | 'series' | 'tt'>;
+
+export const nameOf = ({ kind, subject, cycle, ordinal, index, of, tt }: Finding): NamedEvent => ({
+  id: eventId(kind.name, subject, cycle, ordinal),
+  kind: kind.name,
+  bodies: subject,
+  cycle,
+  series: of > 1 && kind.sought === 'zero' ? { index, of } : null,
+  tt,
+});
+
+export type EventTeller = (finding: Finding, meeting: string | null) => ForecastEvent;
+
 /** Makes of each finding the whole event: its identity, how sure it is, and what is true at its instant. */
-export function eventTeller(sky: TrackedSky, sites: readonly Site[]): (finding: Finding) => ForecastEvent {
+export function eventTeller(sky: TrackedSky, sites: readonly Site[]): EventTeller {
   const viewers = sites.map((site) => localViewer(site, sky.tracks));
-  return (finding) => {
+  return (finding, meeting) => {
     const { kind, subject, tt } = finding;
     const timing = timingOf(finding, sky);
-    const bodies: readonly Planet[] = subject;
+    let circumstances: Circumstances | null = null;
     return {
-      id: eventId(kind.name, bodies, finding.cycle, finding.ordinal),
-      kind: kind.name,
-      bodies,
-      cycle: finding.cycle,
-      series: finding.of > 1 && kind.sought === 'zero' ? { index: finding.index, of: finding.of } : null,
+      ...nameOf(finding),
       reckoning: kind.reckoning === null ? null : finding.reckoning,
-      tt,
       utc: utcFromTt(tt),
       uncertaintySeconds: {
         tt: timing.seconds,
@@ -41,13 +50,17 @@ export function eventTeller(sky: TrackedSky, sites: readonly Site[]): (finding: 
         kepler: finding.kepler === null ? null : tt - finding.kepler,
       },
       interval: intervalOf(finding, sky, timing),
-      meeting: null,
+      meeting,
       certain: timing.certain,
-      circumstances: circumstancesOf(finding, sky),
+      // Computed when first read: a list of instants never asks, and they are a third of a forecast's work.
+      get circumstances() {
+        circumstances ??= circumstancesOf(finding, sky);
+        return circumstances;
+      },
       local:
         kind.circumstances === 'heliocentric'
           ? []
-          : viewers.map((view) => view(bodies as readonly SkyPlanet[], tt)),
+          : viewers.map((view) => view(subject as readonly SkyPlanet[], tt)),
     };
   };
 }

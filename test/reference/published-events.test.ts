@@ -93,7 +93,7 @@ function nearestEvent(row: Record<string, string>, from: TtDays, to: TtDays): Fo
     (a, b) => Math.abs(a.tt - middle) - Math.abs(b.tt - middle),
   );
   expect(found.length, `no ${kind.name} of ${subject.join('–')} near ${row['when']!}`).toBeGreaterThan(0);
-  return tell(found[0]!);
+  return tell(found[0]!, null);
 }
 
 function quantityOf(event: ForecastEvent, name: string): number {
