@@ -16,6 +16,7 @@ export interface CrossFault {
 export function crossFaults(root: unknown): CrossFault[] {
   return [
     ...spansThatEndTooSoon(root),
+    ...spanTooLong(root),
     ...holidaysThatEndTooSoon(root),
     ...siteIdsTwice(root),
     ...homeNowhere(root),
@@ -39,6 +40,24 @@ function spansThatEndTooSoon(root: unknown): CrossFault[] {
         ]
       : [];
   });
+}
+
+/** A report of more years than this is a ream of paper that nobody reads, and needs gigabytes to make. */
+const LONGEST_PLAN_YEARS = 25;
+
+function spanTooLong(root: unknown): CrossFault[] {
+  const words = [wordAt(root, ['span', 'from']), wordAt(root, ['span', 'to'])];
+  const [start, end] = words.map((word) => (word === null ? { problem: '' } : readInstant(word, 'UTC')));
+  if (start === undefined || end === undefined || !('value' in start) || !('value' in end)) return [];
+  const years = (end.value - start.value) / (365.25 * 86_400_000);
+  return years > LONGEST_PLAN_YEARS + 0.01
+    ? [
+        {
+          path: ['span', 'to'],
+          problem: `the span is ${Math.round(years)} years long: a plan covers at most ${LONGEST_PLAN_YEARS}; for more, ask \`synodos events\` for tables alone`,
+        },
+      ]
+    : [];
 }
 
 /** The zone of the home site; null where there is none, or where it cannot be told for another fault. */

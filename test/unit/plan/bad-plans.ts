@@ -114,6 +114,13 @@ export const badPlans: readonly BadPlan[] = [
     ],
   },
   {
+    what: 'a span that no one could read',
+    text: 'title: T\nspan: { from: 2000-01-01, to: 2600-01-01 }\n',
+    lines: [
+      'p.yaml:2:31: span.to: the span is 600 years long: a plan covers at most 25; for more, ask `synodos events` for tables alone',
+    ],
+  },
+  {
     what: 'an empty span',
     text: 'title: T\nspan: { from: 2028-01-01, to: 2028-01-01 }\n',
     lines: [
