@@ -16,7 +16,9 @@ describe('forecast', () => {
     const pieces = parts.slice(1).flatMap((to, i) => ask(parts[i]!, to).events);
     expect(pieces.map(({ id }) => id)).toEqual(whole.events.map(({ id }) => id));
     // A search that begins elsewhere ends within its own tolerance of the same instant: 0.01 s.
-    pieces.forEach(({ tt }, i) => { expect(tt).toBeCloseTo(whole.events[i]!.tt, 6); });
+    pieces.forEach(({ tt }, i) => {
+      expect(tt).toBeCloseTo(whole.events[i]!.tt, 6);
+    });
     expect(whole.events.length).toBeGreaterThan(180);
   });
 
