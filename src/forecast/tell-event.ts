@@ -35,7 +35,6 @@ export function eventTeller(sky: TrackedSky, sites: readonly Site[]): EventTelle
   return (finding, meeting) => {
     const { kind, subject, tt } = finding;
     const timing = timingOf(finding, sky);
-    let circumstances: Circumstances | null = null;
     return {
       ...nameOf(finding),
       reckoning: kind.reckoning === null ? null : finding.reckoning,
@@ -52,11 +51,7 @@ export function eventTeller(sky: TrackedSky, sites: readonly Site[]): EventTelle
       interval: intervalOf(finding, sky, timing),
       meeting,
       certain: timing.certain,
-      // Computed when first read: a list of instants never asks, and they are a third of a forecast's work.
-      get circumstances() {
-        circumstances ??= circumstancesOf(finding, sky);
-        return circumstances;
-      },
+      circumstances: circumstancesOf(finding, sky),
       local:
         kind.circumstances === 'heliocentric'
           ? []

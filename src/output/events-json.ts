@@ -22,24 +22,35 @@ const toDigits = (value: number | null, digits: number): number | null =>
   value === null ? null : rounded(value, digits);
 
 /** The forecast as JSON, by `data/events.schema.json`. Ends with a newline. */
-export function eventsJson(forecast: Forecast, sites: readonly Site[]): string {
-  return [
-    '{',
-    `"schema": ${JSON.stringify(EVENTS_SCHEMA)},`,
-    `"span": ${JSON.stringify({ from: isoUtc(forecast.from), to: isoUtc(forecast.to) })},`,
-    `"source": ${JSON.stringify(forecast.source)},`,
-    `"bodies": ${JSON.stringify(forecast.bodies)},`,
-    `"sites": ${linePerItem(sites, siteJson)},`,
-    `"events": ${linePerItem(forecast.events, eventJson)},`,
-    `"meetings": ${linePerItem(forecast.meetings, meetingJson)}`,
-    '}',
-    '',
-  ].join('\n');
+export const eventsJson = (forecast: Forecast, sites: readonly Site[]): string =>
+  [...eventsJsonLines(forecast, sites)].join('');
+
+/**
+ * The same piece by piece, a line an item: two forecasts can be compared line by line, and a century is written
+ * without ever standing in memory whole.
+ */
+export function* eventsJsonLines(forecast: Forecast, sites: readonly Site[]): Generator<string> {
+  const span = { from: isoUtc(forecast.from), to: isoUtc(forecast.to) };
+  yield `{\n"schema": ${JSON.stringify(EVENTS_SCHEMA)},\n`;
+  yield `"span": ${JSON.stringify(span)},\n`;
+  yield `"source": ${JSON.stringify(forecast.source)},\n`;
+  yield `"bodies": ${JSON.stringify(forecast.bodies)},\n`;
+  yield* arrayLines('sites', sites, siteJson);
+  yield ',\n';
+  yield* arrayLines('events', forecast.events, eventJson);
+  yield ',\n';
+  yield* arrayLines('meetings', forecast.meetings, meetingJson);
+  yield '\n}\n';
 }
 
-/** An array with an item a line: two forecasts can be compared line by line, and a century stays small. */
-function linePerItem<Item>(items: readonly Item[], shape: (item: Item) => unknown): string {
-  return items.length === 0 ? '[]' : `[\n${items.map((item) => JSON.stringify(shape(item))).join(',\n')}\n]`;
+function* arrayLines<Item>(
+  name: string,
+  items: readonly Item[],
+  shape: (item: Item) => unknown,
+): Generator<string> {
+  yield `"${name}": [`;
+  for (let i = 0; i < items.length; i++) yield `${i === 0 ? '' : ','}\n${JSON.stringify(shape(items[i]!))}`;
+  yield items.length === 0 ? ']' : '\n]';
 }
 
 const siteJson = (site: Site) => ({

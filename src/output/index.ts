@@ -11,7 +11,13 @@ export {
   summaryOf,
 } from './event-words.js';
 export { eventsCsv } from './events-csv.js';
-export { EVENTS_SCHEMA, RESIDUALS_SCHEMA, eventsJson, residualsJson } from './events-json.js';
+export {
+  EVENTS_SCHEMA,
+  RESIDUALS_SCHEMA,
+  eventsJson,
+  eventsJsonLines,
+  residualsJson,
+} from './events-json.js';
 export { OBSERVABLE_ELONGATION_DEG, headlineOf, isObservable } from './headline.js';
 export { eventsMarkdown, markdownTable, markdownText } from './markdown.js';
 export { angleWords, degreesMinutesSeconds, fixed, hoursWords, signed } from './numbers.js';

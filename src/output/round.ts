@@ -1,6 +1,8 @@
-/** Rounded to a number of decimals, as a number: no false precision, and the same bytes everywhere. */
+const POWERS_OF_TEN = [1, 10, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9] as const;
+
+/** Rounded to a number of decimals (nine at most), as a number: no false precision, and the same bytes everywhere. */
 export function rounded(value: number, digits: number): number {
-  const scale = 10 ** digits;
+  const scale = POWERS_OF_TEN[digits]!;
   return Math.round(value * scale) / scale + 0;
 }
 

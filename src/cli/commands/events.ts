@@ -81,7 +81,7 @@ async function written(
   sites: readonly Site[],
   format: Format,
   toFile: boolean,
-): Promise<string> {
+): Promise<string | Iterable<string>> {
   if (format === 'ics') {
     const { eventsCalendar } = await import('../../output/calendar/index.js');
     const title = { name: 'Synodos', description: 'Configurations of the planets' };
@@ -96,7 +96,7 @@ async function written(
         .map((line) => `${line}\n`)
         .join('');
     case 'json':
-      return output.eventsJson(found, sites);
+      return output.eventsJsonLines(found, sites);
     case 'csv':
       return output.eventsCsv(found, sites);
     case 'md':
