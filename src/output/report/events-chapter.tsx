@@ -1,6 +1,7 @@
 import type { ForecastEvent } from '../../forecast/index.js';
 import type { Site } from '../../sky/index.js';
 import { bodiesWords, kindTitles } from '../event-words.js';
+import { fixed } from '../numbers.js';
 import { dateAndClock, uncertaintyShort } from '../uncertainty-words.js';
 import { Cautions } from './cautions.js';
 import { EventCell } from './event-cell.js';
@@ -94,7 +95,7 @@ function FromTheSun({ events, zone }: { events: readonly ForecastEvent[]; zone: 
             cell: ({ circumstances }) =>
               circumstances.about === 'heliocentric'
                 ? circumstances.bodies
-                    .map(({ heliocentricLongitudeDeg }) => `${heliocentricLongitudeDeg.toFixed(1)}°`)
+                    .map(({ heliocentricLongitudeDeg }) => `${fixed(heliocentricLongitudeDeg, 1)}°`)
                     .join(', ')
                 : '',
           },

@@ -101,7 +101,6 @@ summary{cursor:pointer;color:var(--link);font-size:.875rem}
 dl{display:grid;grid-template-columns:11rem 1fr;gap:.7rem 1.4rem;font-size:.9375rem}
 dt{font-family:var(--serif);font-weight:600}
 dd{margin:0}
-footer{margin-top:4rem;border-top:1px solid var(--rule)}
 @media (max-width:44rem){
 body{padding-top:2rem}
 h1{font-size:2.05rem}
@@ -117,9 +116,10 @@ dd{margin-bottom:.8rem}
 .stack tr{padding:.7rem 0;border-bottom:1px solid var(--rule)}
 .stack td,.stack th{border:0;padding:.1rem 0;width:auto}
 .stack tbody th{font-weight:600}
+.stack tbody th span{font-weight:400}
 .stack .number{text-align:left}
 .events .when,.events .what{width:auto}
 .stack td[data-label]::before{content:attr(data-label) ": ";color:var(--quiet)}
-.stack .bare::before{content:none}
+.stack td.bare[data-label]::before{content:none}
 }
 ${printStyles}`;
