@@ -27,7 +27,11 @@ export const methodWords: readonly (readonly [term: string, words: string])[] = 
   ['Magnitudes', 'Mallama & Hilton (2018), Mars averaged over its rotation.'],
   [
     'Best look',
-    'The minute of that night at which the lowest of the bodies stands highest above the site’s own horizon, at least 5° high, with the Sun 6° or more below the horizon (12° for Uranus and Neptune); bright twilight where nothing better exists. Refraction by Sæmundsson (1986).',
+    'The minute of that night at which the lowest of the bodies stands highest above the site’s own horizon, at least 5° high, with the Sun 6° or more below the horizon (12° for Uranus and Neptune) and far enough below the planet for the eye to find it (arcus visionis by Schoch, 1928); bright twilight only for Venus and Jupiter, where darkness offers nothing. Refraction by Sæmundsson (1986).',
+  ],
+  [
+    'Seasons',
+    'Every fourth night: how long each planet stands at least 5° high and above the site’s own horizon between the civil twilights (the nautical ones for Uranus and Neptune). Without a site, how long its elongation alone keeps it up in a night of twelve hours.',
   ],
   [
     'Times',
