@@ -5,7 +5,8 @@
 export class BlockCache<Block> {
   private readonly blocks = new Map<number, Block>();
   /** Most readers come back to the block they have just read. */
-  private last: { readonly index: number; readonly block: Block } | null = null;
+  private lastIndex = NaN;
+  private lastBlock: Block | undefined;
 
   constructor(
     private readonly make: (index: number) => Block,
@@ -13,9 +14,10 @@ export class BlockCache<Block> {
   ) {}
 
   get(index: number): Block {
-    if (this.last?.index === index) return this.last.block;
+    if (this.lastIndex === index && this.lastBlock !== undefined) return this.lastBlock;
     const block = this.blocks.get(index) ?? this.add(index);
-    this.last = { index, block };
+    this.lastIndex = index;
+    this.lastBlock = block;
     return block;
   }
 

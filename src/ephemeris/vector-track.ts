@@ -129,11 +129,18 @@ export class BlockFit {
     fitChebyshev(this.xs, fitted, 0);
     fitChebyshev(this.ys, fitted, nodes);
     fitChebyshev(this.zs, fitted, 2 * nodes);
-    const largest = fitted.reduce((most, c) => Math.max(most, Math.abs(c)), 0);
-    const matters = (j: number): boolean =>
-      [0, nodes, 2 * nodes].some((axis) => Math.abs(fitted[axis + j]!) > NEGLIGIBLE * largest);
+    let largest = 0;
+    for (const coefficient of fitted) largest = Math.max(largest, Math.abs(coefficient));
+    const noise = NEGLIGIBLE * largest;
     let terms = nodes;
-    while (terms > FEWEST_TERMS && !matters(terms - 1)) terms--;
+    while (
+      terms > FEWEST_TERMS &&
+      Math.abs(fitted[terms - 1]!) <= noise &&
+      Math.abs(fitted[nodes + terms - 1]!) <= noise &&
+      Math.abs(fitted[2 * nodes + terms - 1]!) <= noise
+    ) {
+      terms--;
+    }
     const block = new Float64Array(3 * terms);
     for (let axis = 0; axis < 3; axis++) {
       block.set(fitted.subarray(axis * nodes, axis * nodes + terms), axis * terms);

@@ -274,7 +274,7 @@ const appulse: Kind = {
       2 * Math.sin(angleBetween(sky.places.apparent(a, tt), sky.places.apparent(b!, tt)) / 2) ** 2,
   sought: 'minimum',
   search: 'all-in-cycle',
-  stepDays: loopStepDays,
+  stepDays: passStepDays,
   accepts: always,
   reports: (sky, [a, b], tt, { withinDeg }) => {
     const jet = separationJet(
@@ -367,12 +367,17 @@ function pairNumbering([a, b]: Subject): Numbering {
 }
 
 /**
- * A fifth of the shortest loop that the subject makes in the sky, or less: Mercury turns back for 20 days, Venus for
- * 41, Mars for 60, the rest for longer.
+ * A fifth of the shortest loop that the subject makes in the sky: Mercury turns back for 20 days, Venus for 41, Mars
+ * for 60, the rest for longer.
  */
 function loopStepDays(subject: Subject): number {
-  if (subject.includes('mercury')) return 3;
+  if (subject.includes('mercury')) return 4;
   return subject.includes('venus') ? 8 : 12;
+}
+
+/** A separation can rise and fall within half a loop. */
+function passStepDays(subject: Subject): number {
+  return subject.includes('mercury') ? 3 : loopStepDays(subject);
 }
 
 const nearestMean = (cycle: MeanCycle, tt: TtDays): TtDays => meanInstant(cycle, cycleNumberAt(cycle, tt));
